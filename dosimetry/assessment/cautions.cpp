@@ -1,0 +1,85 @@
+#include "assessment/cautions.h"
+
+#include "quantities/format.h"
+
+namespace dosimetry {
+namespace {
+
+constexpr Length visible_from = nanometres(400);
+constexpr Length visible_to = nanometres(700);
+constexpr Duration aversion = seconds(0.25);
+
+bool visible(Length wavelength) {
+    return wavelength >= visible_from && wavelength <= visible_to;
+}
+
+}  // namespace
+
+std::vector<std::string> cautions_for(const Setup& setup, const std::vector<const LimitSet*>& sets) {
+    std::vector<std::string> cautions{
+        "This calculation supports a competent person and does not replace one. Local law and site rules "
+        "come first; "
+        "the appointed laser or optical-radiation safety officer decides.",
+        "Exposure limits protect healthy adults. They do not protect patients under treatment, infants, "
+        "people without "
+        "a natural lens, or people whom a medicine has made sensitive to light.",
+        "Never look into a beam. Measure wherever a value or the model is uncertain.",
+        "Hazards other than the beam (electrical, chemical, fire, noise) are not calculated here.",
+    };
+    for (const LimitSet* set : sets)
+        if (!set->edition().text_read)
+            cautions.push_back(set->edition().id + ": " + set->edition().text_note);
+    for (const LaserSetup& source : setup.sources) {
+        const Length wavelength = source.wavelength.value;
+        for (const PositionSetup& position : setup.positions)
+            if (position.exposure.value == aversion && !visible(wavelength))
+                cautions.push_back(
+                    "Position \"" + position.id +
+                    "\": an exposure of 0.25 s cannot rest on the aversion response, since nobody sees " +
+                    exact_number(wavelength.in_si() * 1e9) + " nm.");
+        const Laser laser = make_laser(source);
+        const PlaneAngle smallest = divergence_from_m2(1.0, wavelength, laser.beam.waist());
+        if (laser.beam.profile() == Profile::gaussian && laser.beam.divergence() < smallest * (1 - 1e-9))
+            cautions.push_back("Source \"" + source.id + "\": the divergence of " +
+                               format(laser.beam.divergence(), 3, Rounding::nearest) +
+                               " is less than diffraction allows for this waist (" +
+                               format(smallest, 3, Rounding::down) +
+                               "). Check diameter, divergence and where they are measured; as given, "
+                               "distances come out too long.");
+    }
+    return cautions;
+}
+
+std::vector<std::string> assumptions_for(const Setup& setup) {
+    std::vector<std::string> assumptions;
+    for (const LaserSetup& source : setup.sources) {
+        assumptions.push_back("The beam is continuous and its power constant.");
+        assumptions.push_back(
+            source.beam.profile == Profile::gaussian
+                ? "The beam is circular and Gaussian."
+                : "The beam is circular with a flat top, and keeps that shape while it spreads.");
+        if (!source.beam.waist)
+            assumptions.push_back("The waist of the beam is at the exit: d(z)² = d₀² + (θ z)².");
+        assumptions.push_back(
+            "The beam meets nothing between the exit and the position; air takes nothing away.");
+        assumptions.push_back("Pupil and skin are centred on the beam axis, the most exposed place.");
+        assumptions.push_back(
+            source.apparent_source
+                ? "The apparent source is round, uniform and at the exit; nearer than 100 mm it is judged as "
+                  "seen from 100 mm, since the eye cannot focus nearer."
+                : "The source is judged as a small source (angular subtense at most alpha-min), the most "
+                  "restrictive case for the retina.");
+        for (const PositionSetup& position : setup.positions)
+            if (position.exposure.value == aversion && visible(source.wavelength.value))
+                assumptions.push_back(
+                    "Position \"" + position.id +
+                    "\": 0.25 s presumes the aversion response (blinking and turning away) and that "
+                    "nobody suppresses it; it does not hold for deliberate viewing or with viewing aids.");
+    }
+    assumptions.push_back(
+        "Nobody uses binoculars, a loupe or another viewing aid, and nobody wears protective eyewear.");
+    assumptions.push_back("The stated exposure is the only one of the day.");
+    return assumptions;
+}
+
+}  // namespace dosimetry
