@@ -52,9 +52,9 @@ Criterion make_criterion(const Context& c, const LimitSet& set, const Arrival& a
     criterion.wavelength = c.laser.wavelength;
     criterion.tissue = row.tissue;
     criterion.effect = row.effect;
-    criterion.quantity = row.quantity;
+    criterion.quantity = e.quantity;
     criterion.exposure = e.exposure;
-    criterion.limit = e.limit.value;
+    criterion.limit = e.compared_limit;
     criterion.ratio = e.ratio;
     criterion.rule = "single exposure";
     criterion.aperture = e.limit.aperture;

@@ -4,6 +4,13 @@
 #include <cassert>
 
 namespace dosimetry {
+namespace {
+
+bool is_photochemical(Effect effect) {
+    return effect == Effect::retinal_photochemical || effect == Effect::ultraviolet_photochemical;
+}
+
+}  // namespace
 
 LimitQuery query_for(const Arrival& arrival, Duration exposure, Tissue tissue) {
     return {tissue, arrival.wavelength(), exposure, arrival.subtense(), arrival.exposed_area()};
@@ -17,14 +24,21 @@ Evaluated hold_against(const Limit& limit, const Arrival& arrival, Duration expo
         result.acceptance_share = inside * inside;
     }
     const Irradiance irradiance = arrival.averaged_over(limit.aperture) * result.acceptance_share;
-    if (limit.row->quantity == LimitQuantity::radiant_exposure) {
+    const bool dose_row = limit.row->quantity == LimitQuantity::radiant_exposure;
+    assert(dose_row || limit.row->quantity == LimitQuantity::irradiance);
+    if (dose_row && is_photochemical(limit.row->effect)) {
         const RadiantExposure dose = irradiance * exposure;
+        result.quantity = LimitQuantity::radiant_exposure;
         result.exposure = dose;
+        result.compared_limit = limit.value;
         result.ratio = dose / std::get<RadiantExposure>(limit.value);
     } else {
-        assert(limit.row->quantity == LimitQuantity::irradiance);
+        const Irradiance permitted =
+            dose_row ? std::get<RadiantExposure>(limit.value) / exposure : std::get<Irradiance>(limit.value);
+        result.quantity = LimitQuantity::irradiance;
         result.exposure = irradiance;
-        result.ratio = irradiance / std::get<Irradiance>(limit.value);
+        result.compared_limit = permitted;
+        result.ratio = irradiance / permitted;
     }
     return result;
 }

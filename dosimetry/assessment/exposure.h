@@ -11,7 +11,9 @@ namespace dosimetry {
 /// An arrival held against one limit.
 struct Evaluated {
     Limit limit;
+    LimitQuantity quantity{};  ///< in which exposure and limit are compared
     LimitValue exposure;
+    LimitValue compared_limit;
     double acceptance_share = 1.0;  ///< part of the exposure within the acceptance angle
     double ratio = 0.0;
 };
@@ -23,9 +25,11 @@ LimitQuery query_for(const Arrival& arrival, Duration exposure, Tissue tissue);
 std::variant<std::vector<Evaluated>, NotCovered> evaluate(const Arrival& arrival, Duration exposure,
                                                           Tissue tissue, const LimitSet& set);
 
-/// One limit; the exposure is averaged over its aperture. With a source larger than the acceptance angle γ
-/// only the part inside it counts, (γ/α)² of a uniform round source (ICNIRP 2013, retinal photochemical
-/// limits).
+/// One limit. A continuous beam is compared with thermal limits as irradiance, also where the row states a
+/// radiant exposure (which is divided by the duration: the ratio is the same); photochemical rows keep the
+/// dose they state. The exposure is averaged over its aperture. With a source larger than the acceptance
+/// angle γ only the part inside it counts, (γ/α)² of a uniform round source (ICNIRP 2013, retinal
+/// photochemical limits).
 Evaluated hold_against(const Limit& limit, const Arrival& arrival, Duration exposure);
 
 double largest_ratio(const std::vector<Evaluated>& evaluated);

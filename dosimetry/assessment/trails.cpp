@@ -124,7 +124,7 @@ void add_exposure_steps(Trail& trail, const Arrival& arrival, Duration exposure,
             {"E_γ", "part of it inside the acceptance angle, uniform round source", "E · (γ/α)²",
              si(averaged) + " · (" + si(e.limit.acceptance) + "/" + si(arrival.subtense()) + ")²",
              exact(averaged * e.acceptance_share), definition});
-    if (e.limit.row->quantity == LimitQuantity::radiant_exposure) {
+    if (e.quantity == LimitQuantity::radiant_exposure) {
         const Irradiance counted = averaged * e.acceptance_share;
         trail.steps.push_back({"H", "radiant exposure", "E · t", si(counted) + " · " + si(exposure),
                                exact(std::get<RadiantExposure>(e.exposure)), definition});
@@ -160,12 +160,16 @@ Trail trail_of_criterion(const LaserSetup& stated, const Arrival& arrival, const
     add_limit_steps(trail, e.limit, set, query);
     add_exposure_steps(trail, arrival, exposure, e);
     add_limit_value(trail, e.limit, set, query);
-    const bool dose = row.quantity == LimitQuantity::radiant_exposure;
     const auto value = [](const LimitValue& v) {
         return std::visit([](auto q) { return number(q.in_si()); }, v);
     };
+    const bool dose = e.quantity == LimitQuantity::radiant_exposure;
+    if (row.quantity != e.quantity)
+        trail.steps.push_back({"E_EL", "the same limit as a constant irradiance over the exposure",
+                               "H_EL / t", value(e.limit.value) + " / " + si(exposure),
+                               exact(std::get<Irradiance>(e.compared_limit)), definition});
     trail.steps.push_back({"R", "exposure divided by limit", dose ? "H / H_EL" : "E / E_EL",
-                           value(e.exposure) + " / " + value(e.limit.value), number(e.ratio), definition});
+                           value(e.exposure) + " / " + value(e.compared_limit), number(e.ratio), definition});
     return trail;
 }
 
@@ -227,7 +231,7 @@ Trail trail_of_permitted_exposure(const PermittedExposure& permitted,
             {"R", name_of(e.limit.row->tissue) + ", " + name_of(e.limit.row->effect) + ", at t_max",
              "exposure / limit",
              std::visit([](auto q) { return number(q.in_si()); }, e.exposure) + " / " +
-                 std::visit([](auto q) { return number(q.in_si()); }, e.limit.value),
+                 std::visit([](auto q) { return number(q.in_si()); }, e.compared_limit),
              number(e.ratio), edition.id + ", " + e.limit.row->clause});
     trail.steps.push_back(
         {"t_max", "longest permitted exposure", "longest t with all R(t') ≤ 1, t' ≤ t", "",
