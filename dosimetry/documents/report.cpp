@@ -85,7 +85,7 @@ void position_part(std::string& out, const PositionAssessment& p) {
            padded("ratio", 12) + "clause\n";
     for (const Criterion& c : p.criteria) {
         const bool governs = &c == p.governing_criterion();
-        out += (governs ? "> " : "  ") + padded(name_of(c.tissue) + ", " + name_of(c.effect), 34) +
+        out += (governs ? "> " : "  ") + padded(name_of(c.tissue, c.effect), 34) +
                padded(up(c.exposure), 20) + padded(down(c.limit), 20) +
                padded(format_number(c.ratio, 4, Rounding::up), 12) + c.limit_set + ", " + c.clause + "\n";
     }
@@ -100,6 +100,10 @@ void position_part(std::string& out, const PositionAssessment& p) {
 }
 
 }  // namespace
+
+std::string name_of(Tissue tissue, Effect effect) {
+    return name_of(tissue) + ", " + (effect == Effect::skin_thermal ? "thermal" : name_of(effect));
+}
 
 std::string verdict(const PositionAssessment& p) {
     const std::string what = name_of(p.governing.tissue);

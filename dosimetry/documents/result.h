@@ -17,6 +17,9 @@ std::string result_json(const Setup& setup, const Assessment& assessment, const 
 /// values down.
 std::string report(const Setup& setup, const Assessment& assessment);
 
+/// "eye, retinal thermal", "skin, thermal"
+std::string name_of(Tissue tissue, Effect effect);
+
 /// A verdict in one sentence: "At 0.5 m the eye would receive 5104 times the limit (retinal thermal)."
 std::string verdict(const PositionAssessment& position);
 

@@ -6,6 +6,7 @@
 #include <limits>
 
 #include "quantities/format.h"
+#include "quantities/input_error.h"
 
 namespace dosimetry {
 namespace {
@@ -17,6 +18,10 @@ enum Variable : std::size_t { wavelength_nm = 0, t_s = 1, alpha_mrad = 2, area_m
 /// that was stated on the edge of a row on that edge.
 double to_nm(Length wavelength) {
     return std::round(wavelength.in_si() * 1e18) / 1e9;
+}
+
+std::string shown(double value) {
+    return std::isfinite(value) ? exact_number(value) : shortest(value);
 }
 
 bool within(double value, double from, double to, bool end_included) {
@@ -113,7 +118,10 @@ const FactorPiece& LimitSet::piece_of(const Factor& factor, std::vector<double>&
         if (inside || x == to) found = &piece;
         if (inside) break;
     }
-    assert(found);
+    if (!found)
+        throw InputError(
+            "the factor " + factor.symbol + " has no value for " + factor.over + " = " + shortest(x),
+            "pieces whose ends are numbers");
     return *found;
 }
 
@@ -154,35 +162,43 @@ const AperturePiece& LimitSet::aperture_piece(const Aperture& aperture, double n
     return *found;
 }
 
+double LimitSet::row_value(const LimitRow& row, std::vector<double>& values) const {
+    double value_si = row.coefficient;
+    if (row.t_power != 0.0) value_si *= std::pow(values[t_s], row.t_power);
+    for (const FactorPower& f : row.factors) {
+        const double factor = factor_value(f.factor, values);
+        value_si *= f.power == 1.0 ? factor : std::pow(factor, f.power);
+    }
+    return value_si;
+}
+
+double LimitSet::aperture_mm(const LimitRow& row, const std::vector<double>& values) const {
+    return aperture_piece(apertures_[row.aperture], values[wavelength_nm], values[t_s])
+        .diameter_mm.value(values);
+}
+
 std::variant<std::vector<Limit>, NotCovered> LimitSet::limits_for(const LimitQuery& query) const {
     const double nm = to_nm(query.wavelength);
     const double t = query.exposure.in_si();
     if (!(nm >= edition_.nm_from && nm <= edition_.nm_to))
-        return NotCovered{"wavelength", "the wavelength " + exact_number(nm) + " nm is not covered by " +
+        return NotCovered{"wavelength", "the wavelength " + shown(nm) + " nm is not covered by " +
                                             edition_.id + ", which goes from " +
                                             exact_number(edition_.nm_from) + " nm to " +
                                             exact_number(edition_.nm_to) + " nm"};
     if (!(t >= edition_.s_from && t <= edition_.s_to))
-        return NotCovered{"exposure", "an exposure of " + exact_number(t) + " s is not covered by " +
-                                          edition_.id + ", which goes from " + exact_number(edition_.s_from) +
-                                          " s to " + exact_number(edition_.s_to) + " s"};
+        return NotCovered{"exposure", "an exposure of " + shown(t) + " s is not covered by " + edition_.id +
+                                          ", which goes from " + exact_number(edition_.s_from) + " s to " +
+                                          exact_number(edition_.s_to) + " s"};
 
     std::vector<double> values =
         variables_for(nm, t, query.subtense.in_si() * 1e3, query.exposed_area.in_si());
     std::vector<Limit> limits;
     for (const LimitRow& row : rows_) {
         if (row.tissue != query.tissue || !applies(row, values)) continue;
-        double value_si = row.coefficient;
-        if (row.t_power != 0.0) value_si *= std::pow(t, row.t_power);
-        for (const FactorPower& f : row.factors) {
-            const double factor = factor_value(f.factor, values);
-            value_si *= f.power == 1.0 ? factor : std::pow(factor, f.power);
-        }
         Limit limit;
         limit.row = &row;
-        limit.value = as_quantity(row.quantity, value_si);
-        limit.aperture =
-            millimetres(aperture_piece(apertures_[row.aperture], nm, t).diameter_mm.value(values));
+        limit.value = as_quantity(row.quantity, row_value(row, values));
+        limit.aperture = millimetres(aperture_mm(row, values));
         if (is_retinal(row.effect)) {
             limit.subtense = query.subtense;
             for (std::size_t i = 0; i < factors_.size(); ++i)

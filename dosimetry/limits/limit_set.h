@@ -82,6 +82,8 @@ class LimitSet {
     double factor_value(std::size_t factor, std::vector<double>& values) const;
     double bound_value(const Bound& bound, std::vector<double>& values) const;
     bool applies(const LimitRow& row, std::vector<double>& values) const;
+    double row_value(const LimitRow& row, std::vector<double>& values) const;  ///< SI
+    double aperture_mm(const LimitRow& row, const std::vector<double>& values) const;
     const AperturePiece& aperture_piece(const Aperture& aperture, double wavelength_nm, double t_s) const;
 
     Edition edition_;

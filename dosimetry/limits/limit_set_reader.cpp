@@ -8,6 +8,7 @@
 #include "limits/limit_set.h"
 #include "limits/sha256.h"
 #include "quantities/decimal.h"
+#include "quantities/format.h"
 #include "toml/strict_table.h"
 
 namespace dosimetry {
@@ -19,6 +20,7 @@ constexpr std::size_t variable_count = 4;
 const std::array<std::string, variable_count> variable_names{"wavelength_nm", "t_s", "alpha_mrad", "area_m2"};
 constexpr std::size_t alpha_variable = 2;
 constexpr std::size_t area_variable = 3;
+constexpr std::size_t most_factors = 100;
 
 struct Rectangle {
     double nm_from, nm_to, s_from, s_to;
@@ -41,6 +43,14 @@ std::vector<double> sorted_unique(std::vector<double> v) {
     std::sort(v.begin(), v.end());
     v.erase(std::unique(v.begin(), v.end()), v.end());
     return v;
+}
+
+/// The edges and a value between each two of them.
+std::vector<double> with_middles(const std::vector<double>& edges) {
+    std::vector<double> values = sorted_unique(edges);
+    for (std::size_t i = 0, n = values.size(); i + 1 < n; ++i)
+        values.push_back(middle(values[i], values[i + 1]));
+    return values;
 }
 
 }  // namespace
@@ -86,12 +96,22 @@ class LimitSetReader {
         e.issuer = t.text("issuer");
         e.title = t.text("title");
         e.published_in = t.text("published_in");
-        e.year = static_cast<int>(t.number("year"));
+        const double year = t.number("year");
+        if (!(year >= 1900 && year <= 2200))
+            throw t.error("year", "the year is " + described(t.node("year")), "year = 2013");
+        e.year = static_cast<int>(year);
         e.status = t.text("status");
         e.text_read = t.flag("text_read", false);
         e.text_note = t.maybe_text("text_note").value_or("");
         std::tie(e.nm_from, e.nm_to) = range(t, "nm");
         std::tie(e.s_from, e.s_to) = range(t, "s");
+        const auto bounded = [&t](const char* key, double from, double to) {
+            if (!(from > 0 && to < unbounded))
+                throw t.error(key, std::string("the range ") + key + " of the edition is not bounded",
+                              std::string(key) + " = [from, to], both finite and above zero");
+        };
+        bounded("nm", e.nm_from, e.nm_to);
+        bounded("s", e.s_from, e.s_to);
     }
 
     void read_provenances() {
@@ -161,10 +181,10 @@ class LimitSetReader {
         return {from, to};
     }
 
-    Formula formula(const StrictTable& t, const std::string& key) const {
+    Formula formula(const StrictTable& t, const std::string& key, std::span<const std::string> names) const {
         const std::string text = t.text(key);
         try {
-            return {text, set_.names_};
+            return {text, names};
         } catch (const InputError& error) {
             throw error.at(t.where(key));
         }
@@ -172,6 +192,8 @@ class LimitSetReader {
 
     void read_factor(const StrictTable& t) {
         Factor factor;
+        if (set_.factors_.size() == most_factors)
+            throw t.error("symbol", "there are too many factors", "at most " + std::to_string(most_factors));
         factor.symbol = t.text("symbol");
         if (std::find(set_.names_.begin(), set_.names_.end(), factor.symbol) != set_.names_.end())
             throw t.error("symbol", "the factor " + quoted(factor.symbol) + " is given twice",
@@ -192,7 +214,7 @@ class LimitSetReader {
             piece.from = bound(p.node("from"), "from", true);
             piece.to = bound(p.node("to"), "to", true);
             piece.end_included = included(p, "end");
-            piece.value = formula(p, "value");
+            piece.value = formula(p, "value", set_.names_);
             if (!factor.pieces.empty()) {
                 const Bound& before = factor.pieces.back().to;
                 if (before.factor != piece.from.factor || before.number != piece.from.number)
@@ -223,7 +245,7 @@ class LimitSetReader {
             AperturePiece piece;
             std::tie(piece.nm_from, piece.nm_to) = range(p, "nm");
             std::tie(piece.s_from, piece.s_to) = range(p, "s");
-            piece.diameter_mm = formula(p, "diameter_mm");
+            piece.diameter_mm = formula(p, "diameter_mm", variable_names);
             aperture.pieces.push_back(std::move(piece));
         }
         if (aperture.pieces.empty())
@@ -263,7 +285,6 @@ class LimitSetReader {
             row.aperture = static_cast<std::size_t>(aperture - set_.apertures_.begin());
             row.alternative_form = section.alternative_form;
             row.clause = r.has("clause") ? clause(r) : clause(t);
-            if (row.note.empty()) row.note = t.maybe_text("note").value_or("");
             check_definitions(row, r);
             set_.rows_.push_back(std::move(row));
         }
@@ -305,9 +326,9 @@ class LimitSetReader {
         if (const auto symbol = r.maybe_text("acceptance")) row.acceptance = factor_power(r, *symbol).factor;
         row.depends_on_subtense =
             row.alpha_from_mrad > 0 || row.alpha_to_mrad < unbounded || row.acceptance.has_value();
-        for (const FactorPower& f : row.factors) {
-            row.depends_on_subtense = row.depends_on_subtense || uses(f.factor, alpha_variable);
-            row.depends_on_area = row.depends_on_area || uses(f.factor, area_variable);
+        for (std::size_t index : factors_of(row)) {
+            row.depends_on_subtense = row.depends_on_subtense || uses(index, alpha_variable);
+            row.depends_on_area = row.depends_on_area || uses(index, area_variable);
         }
         return row;
     }
@@ -345,46 +366,100 @@ class LimitSetReader {
         throw r.error("factors", "unknown factor " + quoted(symbol), known);
     }
 
+    /// Whether the factor itself, without those it is made from, changes with the variable.
     bool uses(std::size_t index, std::size_t variable) const {
         const Factor& factor = set_.factors_[index];
-        if (factor.variable == variable) return true;
-        for (const FactorPiece& piece : factor.pieces)
-            for (std::size_t used : piece.value.used())
-                if (used == variable || (used >= variable_count && uses(used - variable_count, variable)))
-                    return true;
-        return false;
+        if (factor.variable == variable && factor.pieces.size() > 1) return true;
+        return std::any_of(factor.pieces.begin(), factor.pieces.end(), [&](const FactorPiece& piece) {
+            const std::vector<std::size_t> used = piece.value.used();
+            return std::find(used.begin(), used.end(), variable) != used.end();
+        });
+    }
+
+    /// The factors of a row, acceptance and ends of its durations included, and those they are made from.
+    std::vector<std::size_t> factors_of(const LimitRow& row) const {
+        std::vector<bool> needed(set_.factors_.size());
+        for (const FactorPower& f : row.factors) needed[f.factor] = true;
+        for (const auto& index : {row.acceptance, row.s_from.factor, row.s_to.factor})
+            if (index) needed[*index] = true;
+        return with_their_own(std::move(needed));
+    }
+
+    /// A factor is made from earlier ones only, so one pass from the last to the first finds them all.
+    std::vector<std::size_t> with_their_own(std::vector<bool> needed) const {
+        std::vector<std::size_t> indices;
+        for (std::size_t i = needed.size(); i-- > 0;) {
+            if (!needed[i]) continue;
+            indices.push_back(i);
+            for (const FactorPiece& piece : set_.factors_[i].pieces) {
+                for (std::size_t used : piece.value.used())
+                    if (used >= variable_count) needed[used - variable_count] = true;
+                for (const auto& index : {piece.from.factor, piece.to.factor})
+                    if (index) needed[*index] = true;
+            }
+        }
+        return indices;
     }
 
     /// Each factor and the aperture must be defined over the whole row.
     void check_definitions(const LimitRow& row, const StrictTable& r) const {
-        const double s_from = row.s_from.factor ? set_.edition_.s_from : row.s_from.number;
-        const double s_to = row.s_to.factor ? s_from : row.s_to.number;
-        std::vector<std::size_t> factors;
-        for (const FactorPower& f : row.factors) factors.push_back(f.factor);
-        if (row.acceptance) factors.push_back(*row.acceptance);
-        for (std::size_t index : factors) {
-            const Factor& factor = set_.factors_[index];
-            const Bound& first = factor.pieces.front().from;
-            const Bound& last = factor.pieces.back().to;
-            const bool over_nm = factor.variable == 0;
-            const bool over_s = factor.variable == 1;
-            if ((over_nm && (first.number > row.nm_from || last.number < row.nm_to)) ||
-                (over_s && (first.number > s_from || last.number < s_to)))
-                throw r.error("factors", "the factor " + factor.symbol + " is not defined over the whole row",
-                              "a factor whose pieces cover the row");
+        const Edition& e = set_.edition_;
+        const Rectangle whole{row.nm_from, row.nm_to, row.s_from.factor ? e.s_from : row.s_from.number,
+                              row.s_to.factor ? e.s_to : row.s_to.number};
+        for (const auto& index : {row.s_from.factor, row.s_to.factor})
+            if (index) check_end(*index, r);
+        for (std::size_t index : factors_of(row))
+            if (!defined_over(set_.factors_[index], whole))
+                throw r.error(
+                    "factors",
+                    "the factor " + set_.factors_[index].symbol + " is not defined over the whole row",
+                    "a factor whose pieces cover the row");
+        if (!aperture_covers(set_.apertures_[row.aperture], whole))
+            throw r.error(
+                "", "the aperture " + quoted(set_.apertures_[row.aperture].id) + " does not cover this row",
+                "an aperture for its wavelengths and durations");
+    }
+
+    /// Pieces follow one another, so the first and the last end decide.
+    static bool defined_over(const Factor& factor, const Rectangle& whole) {
+        const Bound& first = factor.pieces.front().from;
+        const Bound& last = factor.pieces.back().to;
+        if (first.factor || last.factor) return false;
+        if (factor.variable == 0) return first.number <= whole.nm_from && last.number >= whole.nm_to;
+        if (factor.variable == 1) return first.number <= whole.s_from && last.number >= whole.s_to;
+        return first.number == -unbounded && last.number == unbounded;
+    }
+
+    /// Rows tile rectangles of wavelength and duration for each subtense, so an end may follow the subtense
+    /// only.
+    void check_end(std::size_t index, const StrictTable& r) const {
+        std::vector<bool> needed(set_.factors_.size());
+        needed[index] = true;
+        for (std::size_t i : with_their_own(std::move(needed)))
+            for (std::size_t variable = 0; variable < variable_count; ++variable)
+                if (variable != alpha_variable && uses(i, variable))
+                    throw r.error("s",
+                                  "the factor " + set_.factors_[index].symbol + " depends on " +
+                                      variable_names[variable] + " and cannot be an end of a row",
+                                  "a number, or a factor of alpha_mrad");
+    }
+
+    static bool aperture_covers(const Aperture& aperture, const Rectangle& whole) {
+        std::vector<double> nm_edges{whole.nm_from, whole.nm_to};
+        std::vector<double> s_edges{whole.s_from, whole.s_to};
+        for (const AperturePiece& p : aperture.pieces) {
+            for (double nm : {p.nm_from, p.nm_to})
+                if (nm > whole.nm_from && nm < whole.nm_to) nm_edges.push_back(nm);
+            for (double s : {p.s_from, p.s_to})
+                if (s > whole.s_from && s < whole.s_to) s_edges.push_back(s);
         }
-        for (double nm : {row.nm_from, row.nm_to})
-            for (double s : {s_from, s_to}) {
-                const auto& pieces = set_.apertures_[row.aperture].pieces;
-                const bool found = std::any_of(pieces.begin(), pieces.end(), [&](const AperturePiece& p) {
-                    return nm >= p.nm_from && nm <= p.nm_to && s >= p.s_from && s < p.s_to;
-                });
-                if (!found)
-                    throw r.error("",
-                                  "the aperture " + quoted(set_.apertures_[row.aperture].id) +
-                                      " does not cover this row",
-                                  "an aperture for its wavelengths and durations");
-            }
+        for (double nm : with_middles(nm_edges))
+            for (double s : with_middles(s_edges))
+                if (std::none_of(aperture.pieces.begin(), aperture.pieces.end(), [&](const AperturePiece& p) {
+                        return nm >= p.nm_from && nm <= p.nm_to && s >= p.s_from && s < p.s_to;
+                    }))
+                    return false;
+        return true;
     }
 
     /// Subtenses between which nothing changes but the values of formulas, one for each such range.
@@ -430,10 +505,24 @@ class LimitSetReader {
                     std::vector<double> at = set_.variables_for(nm, s, alpha, 1e-4);
                     std::size_t count = 0;
                     for (std::size_t row = first_row; row < end_row; ++row)
-                        if (set_.applies(set_.rows_[row], at)) ++count;
+                        if (set_.applies(set_.rows_[row], at)) {
+                            ++count;
+                            check_value(set_.rows_[row], at);
+                        }
                     visit(nm, s, alpha, count);
                 }
         }
+    }
+
+    /// A limit that is not a positive number would compare as "not exceeded".
+    void check_value(const LimitRow& row, std::vector<double>& values) const {
+        const double value = set_.row_value(row, values);
+        const double diameter_mm = set_.aperture_mm(row, values);
+        for (const auto& [what, number] : {std::pair{"limit", value}, std::pair{"aperture", diameter_mm}})
+            if (!(number > 0 && number < unbounded))
+                throw InputError(std::string("the ") + what + " of this row is not a positive number" +
+                                     place(values[0], values[1], values[alpha_variable]),
+                                 "a finite number above zero", "", {file_, row.line, 1});
     }
 
     static bool inside(const std::vector<Rectangle>& rectangles, double nm, double s) {
@@ -443,7 +532,7 @@ class LimitSetReader {
     }
 
     static std::string place(double nm, double s, double alpha) {
-        return " at " + shortest(nm) + " nm, " + shortest(s) + " s, " + shortest(alpha) + " mrad";
+        return " at " + exact_number(nm) + " nm, " + exact_number(s) + " s, " + exact_number(alpha) + " mrad";
     }
 
     /// The rows of a section tile what it covers: one row everywhere inside, none outside.

@@ -100,10 +100,10 @@ double parse_number(std::string_view text, DecimalMark mark) {
     if (commas + points > 1)
         throw InputError("the number " + quoted(given) + " has more than one decimal mark", accepted);
     std::replace(plain.begin(), plain.end(), ',', '.');
-    if (!plain.empty() && plain.front() == '+') plain.erase(0, 1);
+    const bool looks_numeric = !plain.empty() && number_prefix_length(plain) == plain.size();
+    if (!plain.empty() && plain.front() == '+') plain.erase(0, 1);  // from_chars knows no plus sign
 
     double value = 0.0;
-    const bool looks_numeric = !plain.empty() && number_prefix_length(plain) == plain.size();
     const auto [end, error] = std::from_chars(plain.data(), plain.data() + plain.size(), value);
     if (!looks_numeric || error == std::errc::invalid_argument || end != plain.data() + plain.size())
         throw InputError(quoted(given) + " is not a number", accepted);

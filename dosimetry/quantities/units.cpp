@@ -108,8 +108,10 @@ class UnitReader {
 
     Scale factor() {
         if (take("(")) {
+            if (++depth_ > deepest) fail();
             Scale inner = product();
             if (!take(")")) fail();
+            --depth_;
             return inner;
         }
         std::size_t length = 0;
@@ -132,7 +134,7 @@ class UnitReader {
     }
 
     int exponent() {
-        take("^");
+        const bool announced = take("^");
         int sign = 1;
         if (take("-") || take("−") || take("⁻")) sign = -1;
         for (int digit = 1; digit <= 3; ++digit) {
@@ -140,11 +142,13 @@ class UnitReader {
             if (take(std::to_string(digit)) || take(superscripts[static_cast<std::size_t>(digit)]))
                 return sign * digit;
         }
-        if (sign < 0) fail();
+        if (sign < 0 || announced) fail();
         return 1;
     }
 
+    static constexpr int deepest = 8;  ///< of nested parentheses; the reader calls itself for each
     std::string_view rest_;
+    int depth_ = 0;
 };
 
 std::string_view trimmed(std::string_view text) {

@@ -5,6 +5,8 @@
 #include <sstream>
 #include <utility>
 
+#include "quantities/decimal.h"
+
 namespace dosimetry {
 namespace {
 
@@ -80,6 +82,7 @@ std::string described(const toml::node& node) {
     if (const auto* text = node.as_string()) return "the text " + quoted(text->get());
     if (node.is_table()) return "a table";
     if (node.is_array()) return "a list";
+    if (const auto* number = node.as_floating_point()) return "the number " + shortest(number->get());
     std::ostringstream stream;
     stream << toml::node_view<const toml::node>(node);
     const char* kind = node.is_number() ? "the number " : node.is_boolean() ? "" : "the date or time ";

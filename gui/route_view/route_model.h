@@ -1,0 +1,53 @@
+#pragma once
+
+#include <optional>
+#include <string>
+#include <utility>
+#include <vector>
+
+#include "assessment/assessment.h"
+
+/// The stretch of the beam where a tissue's limit is exceeded.
+struct RouteZone {
+    dosimetry::Tissue tissue{};
+    dosimetry::Length from;
+    dosimetry::Length to;
+    bool startsBeforeAxis = false;
+    bool endsBehindAxis = false;
+    std::string label;  ///< "eye: above the limit up to 298.2 m"
+};
+
+struct RoutePerson {
+    std::string id;
+    dosimetry::Stated<dosimetry::Length> at;
+    dosimetry::Length beamDiameter;
+    bool current = false;
+    bool assessed = false;
+    double ratio = 0.0;
+};
+
+/// What the route view draws, without pixels. The axis is logarithmic from whole decade to whole decade.
+struct RouteModel {
+    dosimetry::Length from;
+    dosimetry::Length to;
+    std::string sourceId;
+    std::vector<dosimetry::Length> distances;
+    std::vector<dosimetry::Length> diameters;
+    std::vector<RouteZone> zones;
+    std::vector<RoutePerson> people;
+
+    using Axis = std::pair<dosimetry::Length, dosimetry::Length>;
+    /// The axis holds all positions and the hazard distances of the current one, unless it is given.
+    static RouteModel of(const dosimetry::Setup& setup, const dosimetry::Assessment& assessment,
+                         int currentPosition, const std::optional<Axis>& axis = std::nullopt);
+
+    /// Place on the axis, 0 at `from` and 1 at `to`; not clipped.
+    double fractionOf(dosimetry::Length distance) const;
+    dosimetry::Length distanceAt(double fraction) const;
+};
+
+/// A dragged distance as one would type it: three digits, in mm below 1 cm and in m above.
+dosimetry::Stated<dosimetry::Length> roundedDistance(dosimetry::Length distance);
+
+/// "10 cm", "1 m", "100 km" for a decade of the axis.
+std::string decadeLabel(int exponent);

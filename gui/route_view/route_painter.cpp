@@ -1,0 +1,241 @@
+#include "route_view/route_painter.h"
+
+#include <QPainter>
+#include <QPainterPath>
+#include <QPalette>
+#include <cmath>
+
+#include "quantities/format.h"
+#include "window/colours.h"
+
+using namespace dosimetry;
+
+namespace {
+
+QString text(const std::string& s) {
+    return QString::fromStdString(s);
+}
+
+/// Hatching as lines: pattern brushes turn into pictures on paper.
+void hatch(QPainter& painter, const QRectF& rect, const QColor& colour, bool rising, double spacing) {
+    painter.save();
+    painter.setClipRect(rect);
+    painter.setPen(QPen(colour, spacing / 6.0));
+    const double h = rect.height();
+    for (double x = rect.left() - h - std::fmod(rect.left() - h, spacing); x < rect.right() + h;
+         x += spacing) {
+        if (rising)
+            painter.drawLine(QPointF(x, rect.bottom()), QPointF(x + h, rect.top()));
+        else
+            painter.drawLine(QPointF(x, rect.top()), QPointF(x + h, rect.bottom()));
+    }
+    painter.restore();
+}
+
+void paintAxis(QPainter& painter, const RouteModel& model, const RouteLayout& layout,
+               const RouteStyle& style) {
+    const QFontMetricsF metrics(painter.font(), painter.device());
+    const int first = static_cast<int>(std::lround(std::log10(model.from.in_si())));
+    const int last = static_cast<int>(std::lround(std::log10(model.to.in_si())));
+    const double y = layout.plot.bottom();
+    painter.setPen(QPen(style.ink, 1.0));
+    painter.drawLine(QPointF(layout.plot.left(), y), QPointF(layout.plot.right(), y));
+    for (int decade = first; decade <= last; ++decade) {
+        const double x = layout.xOf(metres(std::pow(10.0, decade)));
+        painter.setPen(QPen(style.faint, 1.0));
+        painter.drawLine(QPointF(x, layout.plot.top()), QPointF(x, y));
+        painter.setPen(QPen(style.ink, 1.0));
+        painter.drawLine(QPointF(x, y), QPointF(x, y + metrics.height() * 0.3));
+        const QString label = text(decadeLabel(decade));
+        painter.drawText(QPointF(x - metrics.horizontalAdvance(label) / 2.0, y + metrics.height() * 1.15),
+                         label);
+        if (decade == last) break;
+        for (int k = 2; k < 10; ++k) {
+            const double minor = layout.xOf(metres(k * std::pow(10.0, decade)));
+            painter.drawLine(QPointF(minor, y), QPointF(minor, y + metrics.height() * 0.15));
+        }
+    }
+}
+
+void paintZones(QPainter& painter, const RouteModel& model, const RouteLayout& layout,
+                const RouteStyle& style) {
+    const QFontMetricsF metrics(painter.font(), painter.device());
+    for (Tissue tissue : {Tissue::eye, Tissue::skin}) {
+        const bool eye = tissue == Tissue::eye;
+        const double top = layout.bandTop(tissue);
+        const QColor colour = eye ? style.eye : style.skin;
+        bool any = false;
+        for (const RouteZone& zone : model.zones) {
+            if (zone.tissue != tissue) continue;
+            const double left = zone.startsBeforeAxis ? layout.plot.left() : layout.xOf(zone.from);
+            const double right = zone.endsBehindAxis ? layout.plot.right() : layout.xOf(zone.to);
+            const QRectF band(left, top, right - left, layout.bandHeight);
+            hatch(painter, band, colour, eye, layout.bandHeight * 0.45);
+            painter.setPen(QPen(colour, 1.5));
+            painter.setBrush(Qt::NoBrush);
+            painter.drawRect(band);
+            // the end of the zone goes down to the axis, so that it can be read off
+            QPen down(colour, 1.2, Qt::DashLine);
+            painter.setPen(down);
+            if (!zone.endsBehindAxis)
+                painter.drawLine(QPointF(right, band.bottom()), QPointF(right, layout.plot.bottom()));
+            const QString label = text(zone.label);
+            const double width = metrics.horizontalAdvance(label) + metrics.averageCharWidth() * 2;
+            double x = any ? right + metrics.averageCharWidth() : left + metrics.averageCharWidth() * 2;
+            x = std::min(x, layout.plot.right() - width);
+            const QRectF box(x, top + layout.bandHeight * 0.12, width, layout.bandHeight * 0.76);
+            painter.fillRect(box, style.paper);
+            painter.setPen(style.ink);
+            painter.drawText(box, Qt::AlignCenter, label);
+            any = true;
+        }
+        if (!any) {
+            painter.setPen(style.ink);
+            const QRectF box(layout.plot.left(), top, layout.plot.width(), layout.bandHeight);
+            painter.drawText(box, Qt::AlignVCenter | Qt::AlignLeft,
+                             text(name_of(tissue) + ": within the limits along the whole beam"));
+        }
+    }
+}
+
+void paintBeam(QPainter& painter, const RouteModel& model, const RouteLayout& layout, const RouteStyle& style,
+               double sourceLeft) {
+    const QFontMetricsF metrics(painter.font(), painter.device());
+    double widest = 0.0;
+    for (Length d : model.diameters) widest = std::max(widest, d.in_si());
+    QPolygonF upper;
+    QPolygonF lower;
+    for (std::size_t i = 0; i < model.distances.size(); ++i) {
+        const double x = layout.xOf(model.distances[i]);
+        const double half = layout.halfHeight * model.diameters[i].in_si() / widest;
+        upper << QPointF(x, layout.axisY - half);
+        lower.prepend(QPointF(x, layout.axisY + half));
+    }
+    QColor fill = style.beam;
+    fill.setAlphaF(0.25F);
+    painter.setPen(Qt::NoPen);
+    painter.setBrush(fill);
+    painter.drawPolygon(upper + lower);
+    painter.setBrush(Qt::NoBrush);
+    painter.setPen(QPen(style.beam, 1.6));
+    painter.drawPolyline(upper);
+    painter.drawPolyline(lower);
+    const double boxHeight = metrics.height() * 1.6;
+    const QRectF box(sourceLeft, layout.axisY - boxHeight / 2,
+                     layout.plot.left() - sourceLeft - metrics.averageCharWidth(), boxHeight);
+    painter.drawLine(QPointF(box.right(), layout.axisY), QPointF(layout.plot.left(), layout.axisY));
+    painter.setPen(QPen(style.ink, 1.2));
+    painter.setBrush(style.paper);
+    painter.drawRect(box);
+    painter.drawText(box, Qt::AlignCenter,
+                     metrics.elidedText(text(model.sourceId), Qt::ElideRight, box.width() - 4));
+    const QString wide = QStringLiteral("⌀ ") + text(format(model.diameters.back(), 3, Rounding::up));
+    const double width = metrics.horizontalAdvance(wide) + metrics.averageCharWidth();
+    const QRectF label(layout.plot.right() - width, layout.axisY - metrics.height() / 2, width,
+                       metrics.height());
+    painter.fillRect(label, style.paper);
+    painter.setPen(style.ink);
+    painter.drawText(label, Qt::AlignCenter, wide);
+}
+
+void paintPerson(QPainter& painter, const RoutePerson& person, const RouteLayout& layout,
+                 const RouteStyle& style) {
+    const QFontMetricsF metrics(painter.font(), painter.device());
+    const QRectF r = layout.personRect(person);
+    const double x = r.center().x();
+    const double head = r.height() * 0.13;
+    const QColor colour = person.current ? style.highlight : style.ink;
+    painter.setPen(QPen(style.faint, 1.0, Qt::DashLine));
+    painter.drawLine(QPointF(x, r.bottom()), QPointF(x, layout.plot.bottom()));
+    painter.setPen(QPen(colour, person.current ? 2.4 : 1.6, Qt::SolidLine, Qt::RoundCap));
+    painter.setBrush(style.paper);
+    // the eye is on the beam's axis
+    painter.drawEllipse(QPointF(x, layout.axisY), head, head);
+    const double neck = layout.axisY + head;
+    const double hip = neck + (r.bottom() - neck) * 0.5;
+    painter.drawLine(QPointF(x, neck), QPointF(x, hip));
+    painter.drawLine(QPointF(x, neck + head * 0.6), QPointF(x - head * 1.2, neck + (hip - neck) * 0.8));
+    painter.drawLine(QPointF(x, neck + head * 0.6), QPointF(x + head * 1.2, neck + (hip - neck) * 0.8));
+    painter.drawLine(QPointF(x, hip), QPointF(x - head * 0.9, r.bottom()));
+    painter.drawLine(QPointF(x, hip), QPointF(x + head * 0.9, r.bottom()));
+
+    QString second = text(person.at.text);
+    if (person.assessed)
+        second += QStringLiteral(": ") + text(format_number(person.ratio, 4, Rounding::up)) +
+                  QStringLiteral(" × limit");
+    const QStringList lines{text(person.id), second};
+    double width = 0;
+    for (const QString& line : lines) width = std::max(width, metrics.horizontalAdvance(line));
+    width += metrics.averageCharWidth();
+    double left = x + head * 2.0;
+    if (left + width > layout.plot.right()) left = x - head * 2.0 - width;
+    const QRectF box(left, r.bottom() - metrics.height() * 2.1, width, metrics.height() * 2.0);
+    QColor back = style.paper;
+    back.setAlphaF(0.85F);
+    painter.fillRect(box, back);
+    painter.setPen(style.ink);
+    QFont bold = painter.font();
+    bold.setBold(person.current);
+    painter.save();
+    painter.setFont(bold);
+    painter.drawText(box.adjusted(metrics.averageCharWidth() / 2, 0, 0, -metrics.height()),
+                     Qt::AlignLeft | Qt::AlignVCenter, lines[0]);
+    painter.restore();
+    painter.drawText(box.adjusted(metrics.averageCharWidth() / 2, metrics.height(), 0, 0),
+                     Qt::AlignLeft | Qt::AlignVCenter, lines[1]);
+}
+
+}  // namespace
+
+RouteStyle RouteStyle::forScreen(const QPalette& p) {
+    return {p.color(QPalette::Base), p.color(QPalette::Text), colours::faint(p),           colours::beam(p),
+            colours::eyeZone(p),     colours::skinZone(p),    p.color(QPalette::Highlight)};
+}
+
+RouteStyle RouteStyle::forPaper() {
+    return {Qt::white,          Qt::black, QColor(205, 205, 205), QColor(70, 70, 70), Qt::black,
+            QColor(90, 90, 90), Qt::black};
+}
+
+RouteLayout::RouteLayout(const RouteModel& model, const QRectF& area, double lineHeight)
+    : axisY(0), halfHeight(0), bandHeight(lineHeight * 1.5), model_(model), lineHeight_(lineHeight) {
+    const double sourceWidth = std::min(lineHeight * 7.0, area.width() * 0.22);
+    plot = area.adjusted(sourceWidth, lineHeight * 0.4, -lineHeight * 2.2, -lineHeight * 1.6);
+    const double top = bandTop(Tissue::skin) + bandHeight + lineHeight * 0.5;
+    axisY = top + (plot.bottom() - top) * 0.45;
+    halfHeight = (plot.bottom() - top) * 0.42;
+}
+
+double RouteLayout::xOf(Length distance) const {
+    return plot.left() + plot.width() * model_.fractionOf(distance);
+}
+
+Length RouteLayout::distanceAt(double x) const {
+    return model_.distanceAt((x - plot.left()) / plot.width());
+}
+
+double RouteLayout::bandTop(Tissue tissue) const {
+    return plot.top() + (tissue == Tissue::eye ? 0.0 : bandHeight + lineHeight_ * 0.3);
+}
+
+QRectF RouteLayout::personRect(const RoutePerson& person) const {
+    const double below = std::min(plot.bottom() - axisY - lineHeight_ * 0.4, lineHeight_ * 5.0);
+    const double head = below * 0.15;
+    return {xOf(person.at.value) - below * 0.25, axisY - head, below * 0.5, below + head};
+}
+
+void paintRoute(QPainter& painter, const QRectF& area, const RouteModel& model, const RouteStyle& style) {
+    painter.save();
+    painter.setRenderHint(QPainter::Antialiasing);
+    const QFontMetricsF metrics(painter.font(), painter.device());
+    const RouteLayout layout(model, area, metrics.height());
+    painter.fillRect(area, style.paper);
+    paintAxis(painter, model, layout, style);
+    paintZones(painter, model, layout, style);
+    paintBeam(painter, model, layout, style, area.left() + metrics.averageCharWidth());
+    for (const RoutePerson& person : model.people)
+        if (!person.current) paintPerson(painter, person, layout, style);
+    for (const RoutePerson& person : model.people)
+        if (person.current) paintPerson(painter, person, layout, style);
+    painter.restore();
+}

@@ -1,0 +1,113 @@
+#include "setup_panel/position_form.h"
+
+#include <QComboBox>
+#include <QFormLayout>
+#include <QHBoxLayout>
+#include <QPushButton>
+
+#include "fields/bindings.h"
+#include "fields/choice_field.h"
+#include "session/session.h"
+
+using namespace dosimetry;
+
+namespace {
+
+std::string unusedId(const Setup& setup, const std::string& like) {
+    for (int n = 2;; ++n) {
+        const std::string id = like + " " + std::to_string(n);
+        bool used = false;
+        for (const PositionSetup& p : setup.positions) used = used || p.id == id;
+        if (!used) return id;
+    }
+}
+
+}  // namespace
+
+PositionForm::PositionForm(Session& session, QWidget* parent)
+    : QGroupBox(tr("Positions"), parent),
+      session_(session),
+      chosen_(new QComboBox),
+      remove_(new QPushButton(tr("Remove"))) {
+    auto* form = new QFormLayout(this);
+    form->setFieldGrowthPolicy(QFormLayout::AllNonFixedFieldsGrow);
+
+    auto* add = new QPushButton(tr("Add"));
+    add->setObjectName("position.add");
+    add->setToolTip(tr("Adds a position with the values of the present one"));
+    remove_->setObjectName("position.remove");
+    chosen_->setObjectName("position.chosen");
+    chosen_->setAccessibleName(tr("position shown"));
+    chosen_->setSizePolicy(QSizePolicy::Expanding, QSizePolicy::Fixed);
+    chosen_->setMinimumContentsLength(6);
+    chosen_->setSizeAdjustPolicy(QComboBox::AdjustToMinimumContentsLengthWithIcon);
+    auto* row = new QHBoxLayout;
+    row->addWidget(add);
+    row->addWidget(remove_);
+    form->addRow(tr("Shown"), chosen_);
+    form->addRow(QString(), row);
+
+    const auto current = [this](const Setup& s) -> const PositionSetup& {
+        return s.positions[static_cast<std::size_t>(session_.currentPosition())];
+    };
+    const auto currentIn = [this](Setup& s) -> PositionSetup& {
+        return s.positions[static_cast<std::size_t>(session_.currentPosition())];
+    };
+    const auto addField = [&](const QString& label, FieldBinding binding) {
+        auto* field = new SetupField(session, std::move(binding));
+        connect(&session, &Session::currentPositionChanged, field, &SetupField::reload);
+        form->addRow(label, field);
+    };
+    addField(tr("Name"),
+             {"position.id", tr("name of the position"), [current](const Setup& s) { return current(s).id; },
+              [currentIn](Setup& s, const std::string& text) { currentIn(s).id = nonEmpty(text); }});
+    addField(tr("Distance from exit"),
+             {"position.at", tr("distance of the position"),
+              [current](const Setup& s) { return current(s).at.text; },
+              [currentIn](Setup& s, const std::string& text) { currentIn(s).at = Stated<Length>(text); }});
+    addField(tr("Exposure to assume"), {"position.exposure", tr("exposure to assume"),
+                                        [current](const Setup& s) { return current(s).exposure.text; },
+                                        [currentIn](Setup& s, const std::string& text) {
+                                            currentIn(s).exposure = Stated<Duration>(text);
+                                        }});
+    auto* tissues = new ChoiceField(session, {tr("eye and skin"), tr("eye"), tr("skin")},
+                                    {"position.tissues", tr("tissues assessed"),
+                                     [current](const Setup& s) {
+                                         const PositionSetup& p = current(s);
+                                         return p.eye && p.skin ? 0 : p.eye ? 1 : 2;
+                                     },
+                                     [currentIn](Setup& s, int choice) {
+                                         currentIn(s).eye = choice != 2;
+                                         currentIn(s).skin = choice != 1;
+                                     }});
+    form->addRow(tr("Tissues"), tissues);
+
+    connect(add, &QPushButton::clicked, this, &PositionForm::addCopy);
+    connect(remove_, &QPushButton::clicked, this, &PositionForm::removeCurrent);
+    connect(chosen_, &QComboBox::activated, &session_, &Session::setCurrentPosition);
+    connect(&session_, &Session::setupChanged, this, &PositionForm::showPositions);
+    connect(&session_, &Session::currentPositionChanged, this, &PositionForm::showPositions);
+    showPositions();
+}
+
+void PositionForm::showPositions() {
+    chosen_->clear();
+    for (const PositionSetup& p : session_.setup().positions) chosen_->addItem(QString::fromStdString(p.id));
+    chosen_->setCurrentIndex(session_.currentPosition());
+    remove_->setEnabled(session_.setup().positions.size() > 1);
+}
+
+void PositionForm::addCopy() {
+    Setup next = session_.setup();
+    PositionSetup copy = next.positions[static_cast<std::size_t>(session_.currentPosition())];
+    copy.id = unusedId(next, copy.id);
+    next.positions.push_back(copy);
+    session_.edit(next, tr("new position"));
+    session_.setCurrentPosition(static_cast<int>(next.positions.size()) - 1);
+}
+
+void PositionForm::removeCurrent() {
+    Setup next = session_.setup();
+    next.positions.erase(next.positions.begin() + session_.currentPosition());
+    session_.edit(next, tr("removal of a position"));
+}
