@@ -1,16 +1,32 @@
 #include "assessment/cautions.h"
 
+#include <utility>
+
 #include "quantities/format.h"
 
 namespace dosimetry {
 namespace {
 
-constexpr Length visible_from = nanometres(400);
-constexpr Length visible_to = nanometres(700);
+constexpr double visible_from_nm = 400.0;
+constexpr double visible_to_nm = 700.0;
 constexpr Duration aversion = seconds(0.25);
 
 bool visible(Length wavelength) {
-    return wavelength >= visible_from && wavelength <= visible_to;
+    const double nm = in_nanometres(wavelength);
+    return nm >= visible_from_nm && nm <= visible_to_nm;
+}
+
+/// What an exposure of at most 0.25 s rests on. The aversion response may be presumed for 400-700 nm only.
+std::string short_exposure_caution(const PositionSetup& position, Length wavelength) {
+    if (position.exposure.value > aversion) return {};
+    const std::string start =
+        "Position \"" + position.id + "\": an exposure of only " + position.exposure.text;
+    if (!visible(wavelength))
+        return start + " cannot rest on the aversion response, since nobody sees " +
+               exact_number(in_nanometres(wavelength)) + " nm. Something else must be certain to end it.";
+    if (position.exposure.value < aversion)
+        return start + " is shorter than the aversion response. Something else must be certain to end it.";
+    return {};
 }
 
 }  // namespace
@@ -32,11 +48,8 @@ std::vector<std::string> cautions_for(const Setup& setup, const std::vector<cons
     for (const LaserSetup& source : setup.sources) {
         const Length wavelength = source.wavelength.value;
         for (const PositionSetup& position : setup.positions)
-            if (position.exposure.value == aversion && !visible(wavelength))
-                cautions.push_back(
-                    "Position \"" + position.id +
-                    "\": an exposure of 0.25 s cannot rest on the aversion response, since nobody sees " +
-                    exact_number(wavelength.in_si() * 1e9) + " nm.");
+            if (std::string caution = short_exposure_caution(position, wavelength); !caution.empty())
+                cautions.push_back(std::move(caution));
         const Laser laser = make_laser(source);
         const PlaneAngle smallest = divergence_from_m2(1.0, wavelength, laser.beam.waist());
         if (laser.beam.profile() == Profile::gaussian && laser.beam.divergence() < smallest * (1 - 1e-9))

@@ -11,7 +11,7 @@ enum class WidthDefinition {
     one_over_e2,  ///< irradiance down to 1/e² of the peak
     one_over_e,   ///< irradiance down to 1/e of the peak
     fwhm,         ///< full width at half maximum
-    d4sigma,      ///< second moments, ISO 11146-1:2021 clause 3
+    d4sigma,      ///< second moments, ISO 11146-1:2021, clause 3 (from memory)
     enclosed_63,  ///< circle that holds 1 − 1/e = 63.2 % of the power
     enclosed_86,  ///< circle that holds 1 − 1/e² = 86.5 % of the power
 };
@@ -25,8 +25,8 @@ double reference_over_measured(Profile profile, WidthDefinition definition);
 /// A beam of circular cross-section in free space. All diameters here are reference diameters.
 ///
 /// Hyperbolic propagation, d(z)² = d_w² + θ² (z − z_w)², with waist diameter d_w at z_w and full-angle
-/// far-field divergence θ (ISO 11146-1:2021, clause 5; ISO 11145:2018). It is exact for second moments; that
-/// a top-hat keeps its shape while it spreads is an approximation.
+/// far-field divergence θ (ISO 11146-1:2021, clause 5; clause from memory). It is exact for second moments;
+/// that a top-hat keeps its shape while it spreads is an approximation.
 class CircularBeam {
   public:
     CircularBeam(Profile profile, Length waist, Length waist_at, PlaneAngle divergence);
@@ -55,8 +55,8 @@ class CircularBeam {
 };
 
 /// Full-angle divergence of a beam with beam propagation ratio M²: θ = 4 M² λ/(π d_w), for second-moment
-/// (D4σ) diameters (ISO 11146-1:2021, clause 3). For both profiles the D4σ diameter is the reference
-/// diameter.
+/// (D4σ) diameters (ISO 11146-1:2021, clause 3; clause from memory). For both profiles the D4σ diameter is
+/// the reference diameter.
 PlaneAngle divergence_from_m2(double m2, Length wavelength, Length waist);
 
 }  // namespace dosimetry

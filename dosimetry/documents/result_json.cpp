@@ -38,7 +38,7 @@ const char* ascii_unit(LimitQuantity quantity) {
 Json criterion_json(const Criterion& c) {
     return {{"limit_set", c.limit_set},
             {"source", c.source},
-            {"wavelength_nm", c.wavelength.in_si() * 1e9},
+            {"wavelength_nm", in_nanometres(c.wavelength)},
             {"tissue", name_of(c.tissue)},
             {"effect", name_of(c.effect)},
             {"quantity", name_of(c.quantity)},

@@ -20,7 +20,7 @@ class SetupReader {
 
     SetupDocument read(const LimitLibrary& library) {
         if (root_.number("format") != 1.0)
-            throw root_.error("format", "the file has format " + described(root_.node("format")),
+            throw root_.error("format", "the format of the file is " + described(root_.node("format")),
                               "format = 1");
         read_assessment();
         if (root_.has("path"))

@@ -14,12 +14,6 @@ namespace {
 constexpr std::size_t variable_count = 4;
 enum Variable : std::size_t { wavelength_nm = 0, t_s = 1, alpha_mrad = 2, area_m2 = 3 };
 
-/// Wavelengths arrive in metres; 532e-9 m times 1e9 is not always 532. Rounding to 1e-9 nm keeps a wavelength
-/// that was stated on the edge of a row on that edge.
-double to_nm(Length wavelength) {
-    return std::round(wavelength.in_si() * 1e18) / 1e9;
-}
-
 std::string shown(double value) {
     return std::isfinite(value) ? exact_number(value) : shortest(value);
 }
@@ -178,7 +172,7 @@ double LimitSet::aperture_mm(const LimitRow& row, const std::vector<double>& val
 }
 
 std::variant<std::vector<Limit>, NotCovered> LimitSet::limits_for(const LimitQuery& query) const {
-    const double nm = to_nm(query.wavelength);
+    const double nm = in_nanometres(query.wavelength);
     const double t = query.exposure.in_si();
     if (!(nm >= edition_.nm_from && nm <= edition_.nm_to))
         return NotCovered{"wavelength", "the wavelength " + shown(nm) + " nm is not covered by " +
@@ -213,7 +207,7 @@ std::variant<std::vector<Limit>, NotCovered> LimitSet::limits_for(const LimitQue
 }
 
 std::vector<FactorStep> LimitSet::derivation(const LimitRow& row, const LimitQuery& query) const {
-    const double nm = to_nm(query.wavelength);
+    const double nm = in_nanometres(query.wavelength);
     const double t = query.exposure.in_si();
     std::vector<double> values =
         variables_for(nm, t, query.subtense.in_si() * 1e3, query.exposed_area.in_si());
@@ -247,7 +241,7 @@ std::vector<FactorStep> LimitSet::derivation(const LimitRow& row, const LimitQue
 }
 
 std::vector<Duration> LimitSet::duration_edges(Tissue tissue, Length wavelength, PlaneAngle subtense) const {
-    const double nm = to_nm(wavelength);
+    const double nm = in_nanometres(wavelength);
     std::vector<double> edges_s{edition_.s_from, edition_.s_to};
     const auto add = [&](double s) {
         if (s > edition_.s_from && s < edition_.s_to) edges_s.push_back(s);

@@ -45,6 +45,9 @@ constexpr Length millimetres(double v) {
 constexpr Length nanometres(double v) {
     return Length::from_si(v * 1e-9);
 }
+/// Wavelength as a plain number of nanometres, rounded to 1e-9 nm: 1200e-9 m times 1e9 is 1200.0000000000002,
+/// and a wavelength stated on the edge of a limit row must stay on it.
+double in_nanometres(Length wavelength);
 constexpr Duration seconds(double v) {
     return Duration::from_si(v);
 }

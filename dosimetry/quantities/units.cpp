@@ -29,29 +29,37 @@ constexpr std::array units{
 
 struct Prefix {
     std::string_view symbol;
-    double factor;
+    int exponent;  // of ten
 };
 // SI Brochure, 9th edition, table 7. Micro in its three spellings: U+00B5, U+03BC and the letter u.
 constexpr std::array prefixes{
-    Prefix{"f", 1e-15}, Prefix{"p", 1e-12}, Prefix{"n", 1e-9}, Prefix{"\u00B5", 1e-6}, Prefix{"\u03BC", 1e-6},
-    Prefix{"u", 1e-6},  Prefix{"m", 1e-3},  Prefix{"c", 1e-2}, Prefix{"d", 1e-1},      Prefix{"k", 1e3},
-    Prefix{"M", 1e6},   Prefix{"G", 1e9},   Prefix{"T", 1e12}, Prefix{"P", 1e15},      Prefix{"a", 1e-18},
+    Prefix{"a", -18},     Prefix{"f", -15}, Prefix{"p", -12}, Prefix{"n", -9}, Prefix{"\u00B5", -6},
+    Prefix{"\u03BC", -6}, Prefix{"u", -6},  Prefix{"m", -3},  Prefix{"c", -2}, Prefix{"d", -1},
+    Prefix{"k", 3},       Prefix{"M", 6},   Prefix{"G", 9},   Prefix{"T", 12}, Prefix{"P", 15},
 };
 
+/// A factor to SI units with the powers of ten kept apart: 5 µs is then 5 / 10^6 s, the double nearest to
+/// 5e-6, whereas 5 × 1e-6 is the one below it and would fall short of a limit row that starts at 5e-6 s.
 struct Scale {
-    double in_si = 1.0;
+    double factor = 1.0;
+    int exponent = 0;
     Dimension dimension;
 };
 
+double scaled(double number, const Scale& scale) {
+    const double power = std::pow(10.0, std::abs(scale.exponent));
+    return scale.exponent < 0 ? number * scale.factor / power : number * scale.factor * power;
+}
+
 std::optional<Scale> find_unit(std::string_view symbol) {
     for (const Unit& unit : units)
-        if (unit.symbol == symbol) return Scale{unit.in_si, unit.dimension};
+        if (unit.symbol == symbol) return Scale{unit.in_si, 0, unit.dimension};
     for (const Prefix& prefix : prefixes) {
         if (!symbol.starts_with(prefix.symbol)) continue;
         const std::string_view rest = symbol.substr(prefix.symbol.size());
         for (const Unit& unit : units)
             if (unit.takes_prefix && unit.symbol == rest)
-                return Scale{prefix.factor * unit.in_si, unit.dimension};
+                return Scale{unit.in_si, prefix.exponent, unit.dimension};
     }
     return std::nullopt;
 }
@@ -99,7 +107,8 @@ class UnitReader {
             }
             first = false;
             const Scale f = factor();
-            result.in_si *= sign > 0 ? f.in_si : 1.0 / f.in_si;
+            result.factor *= sign > 0 ? f.factor : 1.0 / f.factor;
+            result.exponent += sign * f.exponent;
             result.dimension = result.dimension + f.dimension.times(sign);
         }
         if (first) fail();
@@ -130,7 +139,7 @@ class UnitReader {
         if (!unit) fail();
         rest_.remove_prefix(length);
         const int power = exponent();
-        return {std::pow(unit->in_si, power), unit->dimension.times(power)};
+        return {std::pow(unit->factor, power), unit->exponent * power, unit->dimension.times(power)};
     }
 
     int exponent() {
@@ -207,7 +216,7 @@ ReadQuantity read_quantity(std::string_view text, DecimalMark mark) {
             quoted(std::string(rest)) + " in " + quoted(given) + " is not a known unit",
             "m, s, min, h, J, W, eV, Hz, rad, deg, sr with SI prefixes, such as nm, mW, W/cm2, mrad");
     }
-    const double value_si = number * scale.in_si;
+    const double value_si = scaled(number, scale);
     if (!std::isfinite(value_si) || (value_si == 0.0 && number != 0.0))
         throw InputError(quoted(given) + " is too large or too small to calculate with",
                          "magnitudes from 1e-300 to 1e300 in SI units");

@@ -44,7 +44,7 @@ void addZones(RouteModel& model, const Assessment& assessment, const TissueCours
         while (end < z.size() && course.ratio[end] > 1.0) ++end;
         RouteZone zone;
         zone.tissue = course.tissue;
-        zone.from = z[i];
+        zone.from = z[i == 0 ? 0 : i - 1];  // the true start lies between the samples
         zone.startsBeforeAxis = i == 0;
         zone.endsBehindAxis = end == z.size();
         zone.to = z[std::min(end, z.size() - 1)];
@@ -61,9 +61,21 @@ void addZones(RouteModel& model, const Assessment& assessment, const TissueCours
     }
 }
 
-}  // namespace
-
-namespace {
+/// What stands where a tissue has no zone on the axis. Whether a limit is exceeded anywhere is the hazard
+/// distance's to say, not the samples'.
+void addRemark(RouteModel& model, const Assessment& assessment, Tissue tissue, Duration exposure) {
+    for (const RouteZone& zone : model.zones)
+        if (zone.tissue == tissue) return;
+    std::string text = name_of(tissue) + ": ";
+    const HazardDistance* edge = hazardDistance(assessment, tissue, exposure);
+    if (!edge)
+        text += "not covered";
+    else if (edge->distance && *edge->distance <= metres(0))
+        text += "within the limits along the whole beam";
+    else
+        text += "above the limit up to " + distance_text(*edge) + ", not drawn here";
+    model.remarks.push_back({tissue, text});
+}
 
 RouteModel::Axis usualAxis(const Setup& setup, const Assessment& assessment, int currentPosition) {
     const PositionSetup& current = setup.positions[static_cast<std::size_t>(currentPosition)];
@@ -93,11 +105,17 @@ RouteModel RouteModel::of(const Setup& setup, const Assessment& assessment, int 
     std::tie(model.from, model.to) = axis ? *axis : usualAxis(setup, assessment, currentPosition);
     model.sourceId = setup.sources.front().id;
 
-    Course course = course_along_beam(setup, LimitLibrary::embedded(), current.exposure.value,
-                                      logarithmic_distances(model.from, model.to, samples));
+    std::vector<Length> distances = logarithmic_distances(model.from, model.to, samples);
+    const Length waist_at = make_laser(setup.sources.front()).beam.waist_at();
+    if (waist_at > model.from && waist_at < model.to)  // the narrowest place, easily between two samples
+        distances.insert(std::upper_bound(distances.begin(), distances.end(), waist_at), waist_at);
+    Course course =
+        course_along_beam(setup, LimitLibrary::embedded(), current.exposure.value, std::move(distances));
     model.distances = std::move(course.distances);
     model.diameters = std::move(course.diameters);
     for (const TissueCourse& line : course.tissues) addZones(model, assessment, line, current.exposure.value);
+    for (Tissue tissue : {Tissue::eye, Tissue::skin})
+        addRemark(model, assessment, tissue, current.exposure.value);
 
     const CircularBeam beam = make_laser(setup.sources.front()).beam;
     for (std::size_t i = 0; i < setup.positions.size(); ++i) {

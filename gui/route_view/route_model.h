@@ -17,6 +17,12 @@ struct RouteZone {
     std::string label;  ///< "eye: above the limit up to 298.2 m"
 };
 
+/// One line on a tissue where no zone can be drawn.
+struct RouteRemark {
+    dosimetry::Tissue tissue{};
+    std::string text;  ///< "eye: within the limits along the whole beam", "eye: not covered"
+};
+
 struct RoutePerson {
     std::string id;
     dosimetry::Stated<dosimetry::Length> at;
@@ -34,6 +40,7 @@ struct RouteModel {
     std::vector<dosimetry::Length> distances;
     std::vector<dosimetry::Length> diameters;
     std::vector<RouteZone> zones;
+    std::vector<RouteRemark> remarks;
     std::vector<RoutePerson> people;
 
     using Axis = std::pair<dosimetry::Length, dosimetry::Length>;

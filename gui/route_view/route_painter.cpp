@@ -89,11 +89,11 @@ void paintZones(QPainter& painter, const RouteModel& model, const RouteLayout& l
             painter.drawText(box, Qt::AlignCenter, label);
             any = true;
         }
-        if (!any) {
+        for (const RouteRemark& remark : model.remarks) {
+            if (remark.tissue != tissue) continue;
             painter.setPen(style.ink);
             const QRectF box(layout.plot.left(), top, layout.plot.width(), layout.bandHeight);
-            painter.drawText(box, Qt::AlignVCenter | Qt::AlignLeft,
-                             text(name_of(tissue) + ": within the limits along the whole beam"));
+            painter.drawText(box, Qt::AlignVCenter | Qt::AlignLeft, text(remark.text));
         }
     }
 }

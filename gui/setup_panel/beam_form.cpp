@@ -115,16 +115,17 @@ BeamSetup restated(const LaserSetup& laser, Spread spread) {
             return next;
         case Spread::exitAndWaist: {
             next.diameter = laser.beam.diameter ? *laser.beam.diameter : mm(exit_diameter);
-            // A waist at the exit would say nothing about the divergence: it is put one metre inside the
-            // laser.
-            const bool at_exit = std::fabs(beam.waist_at().in_si()) < 1e-9 || !laser.beam.waist;
-            const Length at = at_exit ? metres(-1) : beam.waist_at();
-            const Length spread_to_exit = arc(beam.divergence(), at);
-            const double d = (next.diameter->value * scale).in_si();
-            const double w2 = d * d - spread_to_exit.in_si() * spread_to_exit.in_si();
-            const Length waist = w2 > 0.01 * d * d ? metres(std::sqrt(w2)) : metres(0.1 * d);
-            next.waist = at_exit ? mm(waist / scale) : *laser.beam.waist;
-            next.waist_at = at_exit ? Stated<Length>("-1 m") : *laser.beam.waist_at;
+            if (std::fabs(beam.waist_at().in_si()) > 0.0) {
+                next.waist = laser.beam.waist ? *laser.beam.waist : mm(beam.waist() / scale);
+                next.waist_at = *laser.beam.waist_at;
+            } else {
+                // A waist at the exit would say nothing about the divergence. Half the diameter, so far
+                // inside the laser that diameter at the exit and divergence stay as they are.
+                const Length exit_reference = next.diameter->value * scale;
+                next.waist = mm(exit_reference * 0.5 / scale);
+                next.waist_at = restatedAs(
+                    metres(-std::sqrt(0.75) * exit_reference.in_si() / beam.divergence().in_si()), "m", 1.0);
+            }
             return next;
         }
         case Spread::waistAndDivergence:
