@@ -87,10 +87,12 @@ RouteModel::Axis usualAxis(const Setup& setup, const Assessment& assessment, int
     }
     for (Tissue tissue : {Tissue::eye, Tissue::skin})
         if (const HazardDistance* d = hazardDistance(assessment, tissue, current.exposure.value)) {
-            if (!d->distance)
+            if (!d->distance) {
                 farthest = std::max(farthest, farthest_search);
-            else if (*d->distance > metres(0))
+            } else if (*d->distance > metres(0)) {
                 farthest = std::max(farthest, *d->distance);
+                nearest = std::min(nearest, *d->distance);
+            }
         }
     return {decadeBelow(std::min(nearest * 0.5, millimetres(100))),
             decadeAbove(std::max(farthest * 1.3, metres(1)))};
