@@ -10,6 +10,7 @@
 #include "documents/result.h"
 #include "documents/setup_document.h"
 #include "limits/limit_library.h"
+#include "session/recovery.h"
 #include "session/session.h"
 #include "sheet/sheet_writer.h"
 #include "window/main_window.h"
@@ -70,8 +71,10 @@ int main(int argc, char** argv) {
     if (!sheet.empty()) return writeSheet(sheet, file, paper);
 
     Session session;
+    Recovery recovery(session, Recovery::usualFolder());
     MainWindow window(session);
     window.show();
+    if (const auto leftover = recovery.takeLeftover()) window.offerRecovery(leftover->setup, leftover->path);
     if (!file.empty()) window.openFile(QFile::decodeName(file.c_str()));
     return QApplication::exec();
 }

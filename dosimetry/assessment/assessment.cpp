@@ -169,7 +169,8 @@ void find_hazard_distances(const Context& c, std::vector<HazardDistance>& distan
     for (const LimitSet* set : c.sets)
         for (const Stated<Duration>& exposure : exposures)
             for (Tissue tissue : both_tissues) {
-                const OuterEdge edge = outer_edge(nearest_search, farthest_search, {c.laser.beam.waist_at()},
+                const OuterEdge edge = outer_edge(nearest_search, farthest_search,
+                                                  bends_along_beam(c.laser, *set, tissue, exposure.value),
                                                   ratio_along_beam(c.laser, *set, tissue, exposure.value));
                 HazardDistance distance{c.stated.id,   set->edition().id, exposure, tissue,
                                         edge.distance, std::nullopt,      {}};

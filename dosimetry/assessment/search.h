@@ -28,10 +28,16 @@ struct OuterEdge {
 };
 
 /// The farthest distance at which the ratio passes 1, scanning inwards from `farthest` in steps of 1/32
-/// decade with `extra` distances added (a waist), then by TOMS 748 (Alefeld, Potra, Shi, ACM TOMS 21:327,
-/// 1995). Relative error at most 1e-9, always on the far, permitted side.
+/// decade with `extra` distances added (waist, bends of the ratio), then by TOMS 748 (Alefeld, Potra, Shi,
+/// ACM TOMS 21:327, 1995). Maxima of the scan just below 1 are refined, so that a summit between two steps is
+/// not overlooked. Relative error at most 1e-9, always on the far, permitted side.
 OuterEdge outer_edge(Length nearest, Length farthest, const std::vector<Length>& extra,
                      const std::function<double(Length)>& ratio);
+
+/// Distances at which the ratio along the beam may bend or step: the waist, and where subtense or exposed
+/// area pass an edge of the limits.
+std::vector<Length> bends_along_beam(const Laser& laser, const LimitSet& set, Tissue tissue,
+                                     Duration exposure);
 
 /// The ratio to the limits of a tissue along the beam for a fixed exposure; limits that do not change with
 /// the distance are looked up once.

@@ -17,10 +17,13 @@ std::string number(double value) {
     return exact_number(value);
 }
 
-/// SI number without unit, for the "with numbers" column.
+/// A number as part of the "with numbers" column, and a quantity as its SI number without unit.
+std::string term(double value) {
+    return exact_term(value);
+}
 template <class Q>
 std::string si(Q quantity) {
-    return exact_number(quantity.in_si());
+    return term(quantity.in_si());
 }
 
 std::string with_unit(double value, const std::string& unit) {
@@ -44,15 +47,15 @@ void add_beam_steps(Trail& trail, const LaserSetup& stated, const Laser& laser, 
     const Stated<Length>& width = b.waist ? *b.waist : *b.diameter;
     trail.steps.push_back({"d_w", reference_name(b.profile) + " of the waist",
                            "k · " + definition_name(b.measured_at) + " diameter",
-                           number(k) + " · " + si(width.value), exact(beam.waist()), definition_source});
+                           term(k) + " · " + si(width.value), exact(beam.waist()), definition_source});
     if (b.divergence) {
         trail.steps.push_back(
             {"θ", "full-angle divergence for that diameter", "k · θ(" + definition_name(b.measured_at) + ")",
-             number(k) + " · " + si(b.divergence->value), exact(beam.divergence()), definition_source});
+             term(k) + " · " + si(b.divergence->value), exact(beam.divergence()), definition_source});
     } else if (b.m2) {
         trail.steps.push_back(
             {"θ", "full-angle divergence", "4 M² λ / (π d_w)",
-             "4 · " + number(*b.m2) + " · " + si(laser.wavelength) + " / (π · " + si(beam.waist()) + ")",
+             "4 · " + term(*b.m2) + " · " + si(laser.wavelength) + " / (π · " + si(beam.waist()) + ")",
              exact(beam.divergence()), "ISO 11146-1:2021, clause 3 (clause from memory)"});
     } else {
         const Length d = b.diameter->value * k;
@@ -117,7 +120,7 @@ void add_exposure_steps(Trail& trail, const Arrival& arrival, Duration exposure,
                            fraction_numbers(arrival.profile(), a, arrival.beam_diameter()), number(share),
                            "common practice; integral of the profile, docs/methods"});
     trail.steps.push_back({"E", "irradiance averaged over the aperture", "4 P η / (π a²)",
-                           "4 · " + si(arrival.power()) + " · " + number(share) + " / (π · " + si(a) + "²)",
+                           "4 · " + si(arrival.power()) + " · " + term(share) + " / (π · " + si(a) + "²)",
                            exact(averaged), definition});
     if (e.acceptance_share < 1.0)
         trail.steps.push_back(
@@ -161,7 +164,7 @@ Trail trail_of_criterion(const LaserSetup& stated, const Arrival& arrival, const
     add_exposure_steps(trail, arrival, exposure, e);
     add_limit_value(trail, e.limit, set, query);
     const auto value = [](const LimitValue& v) {
-        return std::visit([](auto q) { return number(q.in_si()); }, v);
+        return std::visit([](auto q) { return term(q.in_si()); }, v);
     };
     const bool dose = e.quantity == LimitQuantity::radiant_exposure;
     if (row.quantity != e.quantity)
@@ -177,11 +180,11 @@ Trail trail_of_photon_energy(const Laser& laser) {
     const PhotonEnergy energy = photon_energy(laser.wavelength);
     Trail trail{"Energy of one photon", {}};
     trail.steps.push_back({"Q", "photon energy", "h c / λ",
-                           number(constants::planck_J_s) + " · " + number(constants::speed_of_light_m_per_s) +
+                           term(constants::planck_J_s) + " · " + term(constants::speed_of_light_m_per_s) +
                                " / " + si(laser.wavelength),
                            exact(energy), "Planck relation; h and c exact, SI Brochure 9th edition, 2.2"});
     trail.steps.push_back(
-        {"Q", "the same in electronvolts", "Q / e", si(energy) + " / " + number(constants::electronvolt_J),
+        {"Q", "the same in electronvolts", "Q / e", si(energy) + " / " + term(constants::electronvolt_J),
          number(in_electronvolts(energy)) + " eV", "e exact, SI Brochure 9th edition, 2.2"});
     return trail;
 }
@@ -230,8 +233,8 @@ Trail trail_of_permitted_exposure(const PermittedExposure& permitted,
         trail.steps.push_back(
             {"R", name_of(e.limit.row->tissue) + ", " + name_of(e.limit.row->effect) + ", at t_max",
              "exposure / limit",
-             std::visit([](auto q) { return number(q.in_si()); }, e.exposure) + " / " +
-                 std::visit([](auto q) { return number(q.in_si()); }, e.compared_limit),
+             std::visit([](auto q) { return term(q.in_si()); }, e.exposure) + " / " +
+                 std::visit([](auto q) { return term(q.in_si()); }, e.compared_limit),
              number(e.ratio), edition.id + ", " + e.limit.row->clause});
     trail.steps.push_back(
         {"t_max", "longest permitted exposure", "longest t with all R(t') ≤ 1, t' ≤ t", "",
@@ -243,7 +246,7 @@ Trail trail_of_permitted_exposure(const PermittedExposure& permitted,
 Trail trail_of_permitted_power(const Laser& laser, double ratio) {
     Trail trail{"Highest permitted power", {}};
     trail.steps.push_back({"P_max", "power at which the governing ratio is 1", "P / R",
-                           si(laser.power) + " / " + number(ratio), exact(laser.power / ratio),
+                           si(laser.power) + " / " + term(ratio), exact(laser.power / ratio),
                            "exposures are proportional to the power"});
     return trail;
 }
@@ -251,7 +254,7 @@ Trail trail_of_permitted_power(const Laser& laser, double ratio) {
 Trail trail_of_density(Tissue tissue, double ratio) {
     Trail trail{"Required optical density, " + name_of(tissue), {}};
     trail.steps.push_back({"D", "optical density that brings the exposure to the limit", "max(0, log₁₀ R)",
-                           "max(0, log₁₀ " + number(ratio) + ")", number(std::max(0.0, std::log10(ratio))),
+                           "max(0, log₁₀ " + term(ratio) + ")", number(std::max(0.0, std::log10(ratio))),
                            "definition of optical density"});
     return trail;
 }

@@ -16,10 +16,10 @@ class SetupReader {
   public:
     SetupReader(std::string_view bytes, const std::string& file_name)
         : document_(parse_toml(bytes, file_name, most_setup_bytes)),
-          root_(document_, file_name, "", {"format", "assessment", "source", "path", "position"}) {}
+          root_(document_, file_name, "", {"format", "assessment", "source", "position"}, {"path"}) {}
 
     SetupDocument read(const LimitLibrary& library) {
-        if (root_.number("format") != 1.0)
+        if (root_.number("format", "1") != 1.0)
             throw root_.error("format", "the format of the file is " + described(root_.node("format")),
                               "format = 1");
         read_assessment();
@@ -28,15 +28,13 @@ class SetupReader {
                               "a file without [[path]]");
         note_place(root_, "source");
         note_place(root_, "position");
-        for (
-            const StrictTable& t : root_.tables(
-                "source",
-                {"id",          "kind",       "wavelength",    "lines", "emission", "beam", "apparent_source",
-                 "flux",        "intensity",  "luminous_flux", "peak",  "width",    "size", "viewing_angle",
-                 "temperature", "emissivity", "height",        "file",  "quantity", "at",   "irradiance"}))
+        for (const StrictTable& t : root_.tables(
+                 "source", {"id", "kind", "wavelength", "apparent_source", "emission", "beam"},
+                 {"lines", "flux", "intensity", "luminous_flux", "peak", "width", "size", "viewing_angle",
+                  "temperature", "emissivity", "height", "file", "quantity", "at", "irradiance"}))
             result_.setup.sources.push_back(read_source(t));
         for (const StrictTable& t :
-             root_.tables("position", {"id", "at", "exposure", "tissues", "viewing", "angle", "eyewear"}))
+             root_.tables("position", {"id", "at", "exposure", "tissues", "viewing"}, {"angle", "eyewear"}))
             result_.setup.positions.push_back(read_position(t));
         try {
             check(result_.setup, library);
@@ -51,9 +49,9 @@ class SetupReader {
         if (t.has(key)) result_.places[t.path_of(key)] = t.where(key);
     }
 
-    std::string text(const StrictTable& t, const std::string& key) {
+    std::string text(const StrictTable& t, const std::string& key, const std::string& example = "…") {
         note_place(t, key);
-        return t.text(key);
+        return t.text(key, "\"" + example + "\"");
     }
 
     std::string text_or_empty(const StrictTable& t, const std::string& key) {
@@ -61,18 +59,24 @@ class SetupReader {
     }
 
     /// A name that lists and messages use: not empty.
-    std::string identifier(const StrictTable& t) {
-        std::string id = text(t, "id");
-        if (id.empty()) throw t.error("id", "the id is empty", "a short name, such as \"operator\"");
+    std::string identifier(const StrictTable& t, const std::string& example) {
+        std::string id = text(t, "id", example);
+        if (id.empty()) throw t.error("id", "the id is empty", "a short name, such as \"" + example + "\"");
         return id;
     }
 
     template <class Q>
-    Stated<Q> stated(const StrictTable& t, const std::string& key) {
+    Stated<Q> stated(const StrictTable& t, const std::string& key, const std::string& example) {
         note_place(t, key);
-        const std::string example = key + " = \"" + example_of(Q::dimension) + "\"";
-        if (t.node(key).is_number())
-            throw t.error(key, key + " is " + described(t.node(key)) + " without a unit", example);
+        const std::string accepted = key + " = \"" + example + "\"";
+        const toml::node& node = t.node(key, "\"" + example + "\"");
+        if (node.is_number())
+            throw t.error(key, key + " is " + described(node) + " without a unit", accepted);
+        if (!node.is_string())
+            throw t.error(
+                key,
+                key + " must be a value with its unit in quotation marks, " + described(node) + " is not",
+                accepted);
         try {
             return Stated<Q>(t.text(key));
         } catch (const InputError& error) {
@@ -81,19 +85,20 @@ class SetupReader {
     }
 
     template <class Q>
-    std::optional<Stated<Q>> maybe_stated(const StrictTable& t, const std::string& key) {
-        return t.has(key) ? std::optional(stated<Q>(t, key)) : std::nullopt;
+    std::optional<Stated<Q>> maybe_stated(const StrictTable& t, const std::string& key,
+                                          const std::string& example) {
+        return t.has(key) ? std::optional(stated<Q>(t, key, example)) : std::nullopt;
     }
 
     template <class Enum, std::size_t N>
     Enum choice(const StrictTable& t, const std::string& key, const std::array<ChoiceName<Enum>, N>& names) {
-        const std::string given = text(t, key);
+        const std::string given = text(t, key, std::string(names.front().in_files));
         std::string accepted;
         for (const auto& name : names) {
             if (name.in_files == given) return name.value;
             accepted += (accepted.empty() ? "\"" : ", \"") + std::string(name.in_files) + "\"";
         }
-        throw t.error(key, key + " is " + quoted(given), accepted);
+        throw t.error(key, key + " " + quoted(given) + " is not known in this version", accepted);
     }
 
     /// The files of this format know more than this version calculates; what it cannot do it refuses by name.
@@ -105,7 +110,7 @@ class SetupReader {
     }
 
     void only(const StrictTable& t, const std::string& key, const std::string& supported) {
-        const std::string given = text(t, key);
+        const std::string given = text(t, key, supported);
         if (given != supported)
             throw t.error(key, key + " " + quoted(given) + " is not part of this version",
                           key + " = \"" + supported + "\"");
@@ -132,30 +137,31 @@ class SetupReader {
                          two(date->get().day);
         }
         note_place(t, "limits");
-        setup.limits = t.texts("limits");
+        setup.limits = t.texts("limits", "[\"icnirp_2013_laser\"]");
     }
 
     LaserSetup read_source(const StrictTable& t) {
         LaserSetup source;
         only(t, "kind", "laser");
-        source.id = identifier(t);
+        source.id = identifier(t, "green");
         refuse(t, {"lines"}, "(several wavelengths) is not part of this version");
         refuse(t,
                {"flux", "intensity", "luminous_flux", "peak", "width", "size", "viewing_angle", "temperature",
                 "emissivity", "height", "file", "quantity", "at", "irradiance"},
                "does not belong to a laser");
-        source.wavelength = stated<Length>(t, "wavelength");
-        const StrictTable emission = t.table("emission", {"mode", "power", "energy", "duration", "rate",
-                                                          "pulses_per_burst", "burst_rate", "file"});
+        source.wavelength = stated<Length>(t, "wavelength", "532 nm");
+        const StrictTable emission =
+            t.table("emission", {"mode", "power"},
+                    {"energy", "duration", "rate", "pulses_per_burst", "burst_rate", "file"});
         only(emission, "mode", "continuous");
         refuse(emission, {"energy", "duration", "rate", "pulses_per_burst", "burst_rate", "file"},
                "contradicts continuous emission, which is stated by its power alone");
-        source.power = stated<RadiantPower>(emission, "power");
+        source.power = stated<RadiantPower>(emission, "power", "5 mW");
         note_place(t, "beam");
-        source.beam =
-            read_beam(t.table("beam", {"profile", "diameter", "diameter_x", "diameter_y", "measured_at",
-                                       "divergence", "m2", "waist", "waist_at", "core", "na", "mode"}));
-        source.apparent_source = maybe_stated<Length>(t, "apparent_source");
+        source.beam = read_beam(
+            t.table("beam", {"profile", "diameter", "measured_at", "divergence", "m2", "waist", "waist_at"},
+                    {"diameter_x", "diameter_y", "core", "na", "mode"}));
+        source.apparent_source = maybe_stated<Length>(t, "apparent_source", "3 mm");
         return source;
     }
 
@@ -166,29 +172,31 @@ class SetupReader {
         if (!t.has("measured_at"))
             throw t.error(
                 "",
-                "diameter and divergence are given without measured_at, the definition they are measured by",
+                "the widths of the beam are given without measured_at, the definition they are measured by",
                 "measured_at = \"1/e2\", \"1/e\", \"FWHM\", \"D4sigma\", \"63%\" or \"86.5%\"");
         beam.measured_at = choice(t, "measured_at", width_names);
-        beam.diameter = maybe_stated<Length>(t, "diameter");
-        beam.divergence = maybe_stated<PlaneAngle>(t, "divergence");
+        beam.diameter = maybe_stated<Length>(t, "diameter", "2 mm");
+        beam.divergence = maybe_stated<PlaneAngle>(t, "divergence", "1.2 mrad");
         note_place(t, "m2");
         beam.m2 = t.maybe_number("m2");
-        beam.waist = maybe_stated<Length>(t, "waist");
-        beam.waist_at = maybe_stated<Length>(t, "waist_at");
+        beam.waist = maybe_stated<Length>(t, "waist", "0.1 mm");
+        beam.waist_at = maybe_stated<Length>(t, "waist_at", "0.3 m");
         return beam;
     }
 
     PositionSetup read_position(const StrictTable& t) {
         PositionSetup position;
-        position.id = identifier(t);
-        position.at = stated<Length>(t, "at");
-        position.exposure = stated<Duration>(t, "exposure");
+        position.id = identifier(t, "operator");
+        position.at = stated<Length>(t, "at", "0.5 m");
+        position.exposure = stated<Duration>(t, "exposure", "0.25 s");
         refuse(t, {"angle", "eyewear"}, "is not part of this version");
+        if (t.has("viewing") && t.node("viewing").is_table())
+            throw t.error("viewing", "viewing aids are not part of this version", "viewing = \"unaided\"");
         if (t.has("viewing")) only(t, "viewing", "unaided");
         note_place(t, "tissues");
         if (t.has("tissues")) {
             position.eye = position.skin = false;
-            for (const std::string& tissue : t.texts("tissues")) {
+            for (const std::string& tissue : t.texts("tissues", "[\"eye\", \"skin\"]")) {
                 bool& wanted = tissue == "eye" ? position.eye : position.skin;
                 if (tissue != "eye" && tissue != "skin")
                     throw t.error("tissues", "unknown tissue " + quoted(tissue), "\"eye\", \"skin\"");

@@ -187,7 +187,7 @@ std::string Formula::with_numbers(std::span<const std::string> names, std::span<
     while (!rest.empty()) {
         if (const std::size_t n = name_length(rest); n > 0) {
             const auto found = std::find(names.begin(), names.end(), rest.substr(0, n));
-            result += exact_number(values[static_cast<std::size_t>(found - names.begin())]);
+            result += exact_term(values[static_cast<std::size_t>(found - names.begin())]);
             rest.remove_prefix(n);
         } else if (const std::size_t m = number_prefix_length(rest);
                    m > 0 && rest[0] >= '0' && rest[0] <= '9') {

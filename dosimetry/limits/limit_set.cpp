@@ -14,8 +14,10 @@ namespace {
 constexpr std::size_t variable_count = 4;
 enum Variable : std::size_t { wavelength_nm = 0, t_s = 1, alpha_mrad = 2, area_m2 = 3 };
 
-std::string shown(double value) {
-    return std::isfinite(value) ? exact_number(value) : shortest(value);
+/// Also for values that are no finite numbers.
+template <class Q>
+std::string shown(Q quantity, const char* unit) {
+    return std::isfinite(quantity.in_si()) ? format_round(quantity) : shortest(quantity.in_si()) + " " + unit;
 }
 
 bool within(double value, double from, double to, bool end_included) {
@@ -175,14 +177,15 @@ std::variant<std::vector<Limit>, NotCovered> LimitSet::limits_for(const LimitQue
     const double nm = in_nanometres(query.wavelength);
     const double t = query.exposure.in_si();
     if (!(nm >= edition_.nm_from && nm <= edition_.nm_to))
-        return NotCovered{"wavelength", "the wavelength " + shown(nm) + " nm is not covered by " +
-                                            edition_.id + ", which goes from " +
-                                            exact_number(edition_.nm_from) + " nm to " +
-                                            exact_number(edition_.nm_to) + " nm"};
+        return NotCovered{"wavelength", "the wavelength " + shown(query.wavelength, "m") +
+                                            " is not covered by " + edition_.id + ", which goes from " +
+                                            format_round(nanometres(edition_.nm_from)) + " to " +
+                                            format_round(nanometres(edition_.nm_to))};
     if (!(t >= edition_.s_from && t <= edition_.s_to))
-        return NotCovered{"exposure", "an exposure of " + shown(t) + " s is not covered by " + edition_.id +
-                                          ", which goes from " + exact_number(edition_.s_from) + " s to " +
-                                          exact_number(edition_.s_to) + " s"};
+        return NotCovered{"exposure", "an exposure of " + shown(query.exposure, "s") + " is not covered by " +
+                                          edition_.id + ", which goes from " +
+                                          format_round(seconds(edition_.s_from)) + " to " +
+                                          format_round(seconds(edition_.s_to))};
 
     std::vector<double> values =
         variables_for(nm, t, query.subtense.in_si() * 1e3, query.exposed_area.in_si());
@@ -266,6 +269,48 @@ std::vector<Duration> LimitSet::duration_edges(Tissue tissue, Length wavelength,
     edges_s.erase(std::unique(edges_s.begin(), edges_s.end()), edges_s.end());
     std::vector<Duration> edges;
     for (double s : edges_s) edges.push_back(seconds(s));
+    return edges;
+}
+
+std::vector<double> LimitSet::edges_over(std::size_t variable, Tissue tissue, Length wavelength,
+                                         Duration exposure) const {
+    const double nm = in_nanometres(wavelength);
+    const double t = exposure.in_si();
+    std::vector<double> edges;
+    const auto add = [&edges](double edge) {
+        if (edge > 0.0 && std::isfinite(edge)) edges.push_back(edge);
+    };
+    for (const LimitRow& row : rows_) {
+        const double from = row.s_from.factor ? edition_.s_from : row.s_from.number;
+        const double to = row.s_to.factor ? edition_.s_to : row.s_to.number;
+        if (row.tissue != tissue || !within(nm, row.nm_from, row.nm_to, row.nm_end_included) ||
+            !within(t, from, to, true))
+            continue;
+        std::vector<double> values = variables_for(nm, t, 0.0, 0.0);
+        if (variable == alpha_mrad) {
+            add(row.alpha_from_mrad);
+            add(row.alpha_to_mrad);
+            if (row.acceptance) add(factor_value(*row.acceptance, values));
+        }
+        for (const FactorPower& f : row.factors)
+            if (factors_[f.factor].variable == variable)
+                for (const FactorPiece& piece : factors_[f.factor].pieces) add(bound_value(piece.to, values));
+    }
+    std::sort(edges.begin(), edges.end());
+    edges.erase(std::unique(edges.begin(), edges.end()), edges.end());
+    return edges;
+}
+
+std::vector<PlaneAngle> LimitSet::subtense_edges(Tissue tissue, Length wavelength, Duration exposure) const {
+    std::vector<PlaneAngle> edges;
+    for (double mrad : edges_over(alpha_mrad, tissue, wavelength, exposure))
+        edges.push_back(milliradians(mrad));
+    return edges;
+}
+
+std::vector<Area> LimitSet::area_edges(Tissue tissue, Length wavelength, Duration exposure) const {
+    std::vector<Area> edges;
+    for (double m2 : edges_over(area_m2, tissue, wavelength, exposure)) edges.push_back(Area::from_si(m2));
     return edges;
 }
 

@@ -71,6 +71,11 @@ class LimitSet {
     /// ascending, from the first to the last duration of the edition.
     std::vector<Duration> duration_edges(Tissue tissue, Length wavelength, PlaneAngle subtense) const;
 
+    /// Subtenses and exposed areas at which rows or factors change for that tissue, wavelength and exposure,
+    /// or at which the source fills the acceptance angle; ascending.
+    std::vector<PlaneAngle> subtense_edges(Tissue tissue, Length wavelength, Duration exposure) const;
+    std::vector<Area> area_edges(Tissue tissue, Length wavelength, Duration exposure) const;
+
   private:
     friend class LimitSetReader;
     LimitSet() = default;
@@ -84,6 +89,8 @@ class LimitSet {
     bool applies(const LimitRow& row, std::vector<double>& values) const;
     double row_value(const LimitRow& row, std::vector<double>& values) const;  ///< SI
     double aperture_mm(const LimitRow& row, const std::vector<double>& values) const;
+    std::vector<double> edges_over(std::size_t variable, Tissue tissue, Length wavelength,
+                                   Duration exposure) const;
     const AperturePiece& aperture_piece(const Aperture& aperture, double wavelength_nm, double t_s) const;
 
     Edition edition_;

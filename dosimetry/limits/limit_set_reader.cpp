@@ -68,7 +68,7 @@ class LimitSetReader {
     }
 
     LimitSet read() {
-        if (root_.number("format") != 1.0)
+        if (root_.number("format", "1") != 1.0)
             throw root_.error("format", "the format of the table is " + described(root_.node("format")),
                               "format = 1");
         read_edition();

@@ -6,7 +6,7 @@
 namespace dosimetry {
 
 Length Arrival::viewing_distance() const {
-    return std::max(distance_, millimetres(100));
+    return std::max(distance_, nearest_viewing);
 }
 
 PlaneAngle Arrival::subtense() const {

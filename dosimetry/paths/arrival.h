@@ -7,6 +7,9 @@ namespace dosimetry {
 /// What reaches a position from one source line through free space.
 class Arrival {
   public:
+    /// The eye cannot focus nearer (common practice; measuring distance of 100 mm in BGI 832 and BGV B2).
+    static constexpr Length nearest_viewing = millimetres(100);
+
     Arrival(const Laser& laser, Length distance) : laser_(&laser), distance_(distance) {}
 
     Length wavelength() const { return laser_->wavelength; }

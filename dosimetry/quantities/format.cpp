@@ -66,6 +66,22 @@ std::string_view prefix_symbol(int power) {
     }
 }
 
+/// With the prefix that suits the number's size, for quantities that take one.
+std::string with_suitable_unit(const DecimalNumber& number, bool zero, Dimension dimension) {
+    for (const Ladder& ladder : ladders) {
+        if (!(ladder.dimension == dimension)) continue;
+        const std::string unit(ladder.unit);
+        if (zero) return "0 " + unit;
+        int power = 3 * static_cast<int>(std::floor(number.exponent / 3.0));
+        power = std::min(std::max(power, ladder.smallest_power), ladder.largest_power);
+        const int before_point = number.exponent - power;
+        if (before_point < -3 || before_point > 5) return scientific(number) + " " + unit;
+        return plain_digits(number, -power) + " " + std::string(prefix_symbol(power)) + unit;
+    }
+    const std::string unit = si_unit(dimension);
+    return (zero ? "0" : readable(number)) + (unit.empty() ? "" : " " + unit);
+}
+
 }  // namespace
 
 std::string format_number(double value, int significant, Rounding rounding) {
@@ -76,19 +92,14 @@ std::string format_number(double value, int significant, Rounding rounding) {
 
 std::string format_quantity_si(double value_si, Dimension dimension, int significant, Rounding rounding) {
     assert(std::isfinite(value_si));
-    for (const Ladder& ladder : ladders) {
-        if (!(ladder.dimension == dimension)) continue;
-        if (value_si == 0.0) return "0 " + std::string(ladder.unit);
-        const DecimalNumber number = round_decimal(value_si, significant, rounding);
-        int power = 3 * static_cast<int>(std::floor(number.exponent / 3.0));
-        power = std::min(std::max(power, ladder.smallest_power), ladder.largest_power);
-        const int before_point = number.exponent - power;
-        const std::string unit = std::string(prefix_symbol(power)) + std::string(ladder.unit);
-        if (before_point < -3 || before_point > 5) return scientific(number) + " " + std::string(ladder.unit);
-        return plain_digits(number, -power) + " " + unit;
-    }
-    const std::string unit = si_unit(dimension);
-    return format_number(value_si, significant, rounding) + (unit.empty() ? "" : " " + unit);
+    return with_suitable_unit(round_decimal(value_si, significant, rounding), value_si == 0.0, dimension);
+}
+
+std::string format_round_si(double value_si, Dimension dimension) {
+    assert(std::isfinite(value_si));
+    DecimalNumber number = round_decimal(value_si, 6, Rounding::nearest);
+    drop_trailing_zeros(number);
+    return with_suitable_unit(number, value_si == 0.0, dimension);
 }
 
 std::string exact_number(double value) {
@@ -97,6 +108,11 @@ std::string exact_number(double value) {
     DecimalNumber number = round_decimal(value, 9, Rounding::nearest);
     drop_trailing_zeros(number);
     return readable(number);
+}
+
+std::string exact_term(double value) {
+    const std::string number = exact_number(value);
+    return number.find("×") == std::string::npos ? number : "(" + number + ")";
 }
 
 std::string exact_quantity_si(double value_si, Dimension dimension) {

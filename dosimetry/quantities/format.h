@@ -19,8 +19,20 @@ std::string format(Quantity<D, W> quantity, int significant, Rounding rounding) 
     return format_quantity_si(quantity.in_si(), D, significant, rounding);
 }
 
+/// A round value as people write it, nearest, at most six digits and no trailing zeros: "180 nm", "1 mm",
+/// "100 fs".
+std::string format_round_si(double value_si, Dimension dimension);
+
+template <Dimension D, class W>
+std::string format_round(Quantity<D, W> quantity) {
+    return format_round_si(quantity.in_si(), D);
+}
+
 /// Enough digits to repeat a calculation by hand (9 significant), trailing zeros left out, in the SI unit.
 std::string exact_number(double value);
+/// The same inside a formula: in parentheses where it has a power of ten, so that (2×10⁻⁵)² is not read as
+/// 10⁻⁵².
+std::string exact_term(double value);
 std::string exact_quantity_si(double value_si, Dimension dimension);
 
 template <Dimension D, class W>

@@ -201,7 +201,7 @@ ReadQuantity read_quantity(std::string_view text, DecimalMark mark) {
     const std::string given(text);
     std::string_view rest = trimmed(text);
     if (rest.empty())
-        throw InputError("nothing is given where a value with a unit is expected", "a number and a unit");
+        throw InputError("the text is empty", "a number and a unit");
     const std::size_t length = number_prefix_length(rest);
     if (length == 0 || (length == 1 && (rest[0] == '-' || rest[0] == '+')))
         throw InputError(quoted(given) + " does not start with a number", "a number and a unit");

@@ -1,5 +1,6 @@
 #include "charts/chart_widget.h"
 
+#include <QApplication>
 #include <QCategoryAxis>
 #include <QChart>
 #include <QChartView>
@@ -51,6 +52,8 @@ QCategoryAxis* decadeAxis(const ChartAxis& axis, const QPalette& palette) {
     for (int decade = first; decade <= last; decade += step) result->append(powerOfTen(decade), decade);
     result->setRange(first, last);
     result->setTitleText(axis.title);
+    result->setTitleFont(QApplication::font());
+    result->setLabelsFont(QApplication::font());
     result->setLabelsColor(palette.color(QPalette::Text));
     result->setTitleBrush(palette.color(QPalette::Text));
     result->setGridLineColor(colours::faint(palette));

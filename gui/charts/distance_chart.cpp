@@ -35,7 +35,10 @@ ChartModel distanceChart(const Setup& setup, int currentPosition, const RouteMod
         chart.series.push_back(std::move(limit));
     }
     fitToDecades(chart);
-    if (chart.series.empty()) return chart;
+    if (chart.series.empty()) {
+        chart.title += QObject::tr(": not covered");
+        return chart;
+    }
     const double at = position.at.value.in_si();
     chart.series.push_back({QString::fromStdString(position.id),
                             ChartSeries::Kind::mark,

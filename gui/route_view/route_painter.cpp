@@ -3,7 +3,9 @@
 #include <QPainter>
 #include <QPainterPath>
 #include <QPalette>
+#include <algorithm>
 #include <cmath>
+#include <vector>
 
 #include "quantities/format.h"
 #include "window/colours.h"
@@ -158,31 +160,52 @@ void paintPerson(QPainter& painter, const RoutePerson& person, const RouteLayout
     painter.drawLine(QPointF(x, neck + head * 0.6), QPointF(x + head * 1.2, neck + (hip - neck) * 0.8));
     painter.drawLine(QPointF(x, hip), QPointF(x - head * 0.9, r.bottom()));
     painter.drawLine(QPointF(x, hip), QPointF(x + head * 0.9, r.bottom()));
+}
 
-    QString second = text(person.at.text);
+/// Beside the feet, on the other side or lower down, wherever no other label stands yet.
+void paintLabel(QPainter& painter, const RoutePerson& person, const RouteLayout& layout,
+                const RouteStyle& style, std::vector<QRectF>& taken) {
+    QFont bold = painter.font();
+    bold.setBold(person.current);
+    const QFontMetricsF metrics(painter.font(), painter.device());
+    const QFontMetricsF boldMetrics(bold, painter.device());
+    const QString name = text(person.id);
+    QString value = text(person.at.text);
     if (person.assessed)
-        second += QStringLiteral(": ") + text(format_number(person.ratio, 4, Rounding::up)) +
-                  QStringLiteral(" × limit");
-    const QStringList lines{text(person.id), second};
-    double width = 0;
-    for (const QString& line : lines) width = std::max(width, metrics.horizontalAdvance(line));
-    width += metrics.averageCharWidth();
-    double left = x + head * 2.0;
-    if (left + width > layout.plot.right()) left = x - head * 2.0 - width;
-    const QRectF box(left, r.bottom() - metrics.height() * 2.1, width, metrics.height() * 2.0);
+        value += QStringLiteral(": ") + text(format_number(person.ratio, 4, Rounding::up)) +
+                 QStringLiteral(" × limit");
+    const double gap = metrics.averageCharWidth();
+    const double width =
+        std::max(boldMetrics.horizontalAdvance(name), metrics.horizontalAdvance(value)) + gap;
+    const double height = metrics.height() * 2.0;
+    const QRectF figure = layout.personRect(person);
+    const double right = figure.center().x() + figure.width() * 0.6;
+    const double left = figure.center().x() - figure.width() * 0.6 - width;
+    QRectF box;
+    for (int row = 0; row < 4; ++row) {
+        const double top = figure.bottom() - height + row * (height + metrics.height() * 0.2);
+        bool placed = false;
+        for (double x : {right, left}) {
+            if (x + width > layout.plot.right() || x < layout.plot.left()) continue;
+            box = QRectF(x, top, width, height);
+            placed =
+                std::none_of(taken.begin(), taken.end(), [&](const QRectF& r) { return r.intersects(box); });
+            if (placed) break;
+        }
+        if (placed) break;
+    }
+    if (box.isNull()) box = QRectF(layout.plot.left(), figure.bottom() - height, width, height);
+    taken.push_back(box);
     QColor back = style.paper;
     back.setAlphaF(0.85F);
     painter.fillRect(box, back);
     painter.setPen(style.ink);
-    QFont bold = painter.font();
-    bold.setBold(person.current);
+    const QRectF inner = box.adjusted(gap / 2, 0, 0, 0);
     painter.save();
     painter.setFont(bold);
-    painter.drawText(box.adjusted(metrics.averageCharWidth() / 2, 0, 0, -metrics.height()),
-                     Qt::AlignLeft | Qt::AlignVCenter, lines[0]);
+    painter.drawText(inner.adjusted(0, 0, 0, -height / 2), Qt::AlignLeft | Qt::AlignVCenter, name);
     painter.restore();
-    painter.drawText(box.adjusted(metrics.averageCharWidth() / 2, metrics.height(), 0, 0),
-                     Qt::AlignLeft | Qt::AlignVCenter, lines[1]);
+    painter.drawText(inner.adjusted(0, height / 2, 0, 0), Qt::AlignLeft | Qt::AlignVCenter, value);
 }
 
 }  // namespace
@@ -233,9 +256,13 @@ void paintRoute(QPainter& painter, const QRectF& area, const RouteModel& model, 
     paintAxis(painter, model, layout, style);
     paintZones(painter, model, layout, style);
     paintBeam(painter, model, layout, style, area.left() + metrics.averageCharWidth());
-    for (const RoutePerson& person : model.people)
-        if (!person.current) paintPerson(painter, person, layout, style);
-    for (const RoutePerson& person : model.people)
-        if (person.current) paintPerson(painter, person, layout, style);
+    // the current person last, so that it lies on top; its label first, so that it has the best place
+    std::vector<const RoutePerson*> people;
+    for (const RoutePerson& person : model.people) people.push_back(&person);
+    std::stable_partition(people.begin(), people.end(), [](const RoutePerson* p) { return p->current; });
+    std::vector<QRectF> taken;
+    for (const RoutePerson* person : people) taken.push_back(layout.personRect(*person));
+    for (auto it = people.rbegin(); it != people.rend(); ++it) paintPerson(painter, **it, layout, style);
+    for (const RoutePerson* person : people) paintLabel(painter, *person, layout, style, taken);
     painter.restore();
 }

@@ -101,6 +101,11 @@ void Session::open(const QString& path) {
             path);
 }
 
+void Session::recover(const Setup& setup, const QString& path) {
+    replace(setup, path);
+    undoStack_.resetClean();
+}
+
 void Session::save(const QString& path) {
     writeFileInOnePiece(path, fileBytes());
     path_ = path;

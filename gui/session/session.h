@@ -42,6 +42,8 @@ class Session : public QObject {
     void startNew();
     /// Opens a file. Throws InputError and keeps the present setup if that fails.
     void open(const QString& path);
+    /// Takes over recovered work: unsaved changes that belong to `path`.
+    void recover(const dosimetry::Setup& setup, const QString& path);
     /// Writes the file in one piece (QSaveFile). Throws InputError if that fails; the old file is then
     /// untouched.
     void save(const QString& path);

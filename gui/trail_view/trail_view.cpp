@@ -49,7 +49,7 @@ QString mathHtml(const std::string& formula) {
             html += "<sup>" + text.mid(i + 1, end - i - 1).toHtmlEscaped() + "</sup>";
             i = end - 1;
         } else if (c == '_') {
-            const int end = ends([](QChar d, int) { return d.isLetterOrNumber(); });
+            const int end = ends([](QChar d, int) { return d.unicode() < 128 && d.isLetterOrNumber(); });
             html += "<sub>" + text.mid(i + 1, end - i - 1).toHtmlEscaped() + "</sub>";
             i = end - 1;
         } else {

@@ -10,6 +10,7 @@
 #include <QMimeData>
 #include <QPrintPreviewDialog>
 #include <QPrinter>
+#include <QScreen>
 #include <QSplitter>
 #include <QStatusBar>
 #include <QVBoxLayout>
@@ -89,7 +90,8 @@ MainWindow::MainWindow(Session& session, QWidget* parent)
     showChart();
     emit session_.currentPositionChanged();  // the margins view announces its first trail
 
-    resize(1320, 860);
+    const QSize usual(1320, 860);
+    resize(screen() ? usual.boundedTo(screen()->availableSize() * 0.96) : usual);
     columns_->setSizes({320, 540, 460});
     right_->setSizes({400, 360});
     restoreGeometry(preferences::windowGeometry());
@@ -180,6 +182,14 @@ void MainWindow::openFile(const QString& path) {
     } catch (const InputError& error) {
         say(QString::fromUtf8(error.what()));
     }
+}
+
+void MainWindow::offerRecovery(const dosimetry::Setup& setup, const QString& path) {
+    const QString what = path.isEmpty() ? tr("an assessment without a file") : path;
+    const auto answer = QMessageBox::question(
+        this, tr("Unsaved work found"),
+        tr("The program ended without saving its changes of %1. Take them up again?").arg(what));
+    if (answer == QMessageBox::Yes) session_.recover(setup, path);
 }
 
 bool MainWindow::mayReplace() {

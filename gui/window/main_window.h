@@ -2,6 +2,8 @@
 
 #include <QMainWindow>
 
+#include "assessment/setup.h"
+
 class ChartWidget;
 class MarginsView;
 class QMenu;
@@ -20,6 +22,8 @@ class MainWindow : public QMainWindow {
     explicit MainWindow(Session& session, QWidget* parent = nullptr);
     /// Opens a file, or says in a message why it cannot be opened.
     void openFile(const QString& path);
+    /// Asks whether work that an earlier run left unsaved should be taken up again.
+    void offerRecovery(const dosimetry::Setup& setup, const QString& path);
 
   protected:
     void closeEvent(QCloseEvent* event) override;
