@@ -30,6 +30,7 @@ void fitToDecades(ChartModel& model) {
 }
 
 std::vector<ChartPoint> thinned(const std::vector<ChartPoint>& points) {
+    constexpr double tolerance = 5e-4;  // of the value; a pixel is some percent of it on any chart
     std::vector<ChartPoint> kept;
     for (std::size_t i = 0; i < points.size(); ++i) {
         const bool end = i == 0 || i + 1 == points.size();
@@ -38,7 +39,7 @@ std::vector<ChartPoint> thinned(const std::vector<ChartPoint>& points) {
             const ChartPoint& c = points[i + 1];
             const double share = std::log(points[i].x / a.x) / std::log(c.x / a.x);
             const double straight = std::log(a.y) + share * std::log(c.y / a.y);
-            if (std::fabs(straight - std::log(points[i].y)) < 1e-6) continue;
+            if (std::fabs(straight - std::log(points[i].y)) < tolerance) continue;
         }
         kept.push_back(points[i]);
     }

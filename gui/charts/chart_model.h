@@ -37,5 +37,6 @@ QString powerOfTen(int exponent);
 /// Widens an axis to whole decades that hold all of the series' y values.
 void fitToDecades(ChartModel& model);
 
-/// The points a curve needs: those that lie on the straight line between their neighbours (in logarithms) go.
+/// The points a curve needs: those within 0.05 % of the straight line between their neighbours (in
+/// logarithms) go.
 std::vector<ChartPoint> thinned(const std::vector<ChartPoint>& points);

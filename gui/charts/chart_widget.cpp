@@ -56,9 +56,22 @@ QCategoryAxis* decadeAxis(const ChartAxis& axis, const QPalette& palette) {
     result->setLabelsFont(QApplication::font());
     result->setLabelsColor(palette.color(QPalette::Text));
     result->setTitleBrush(palette.color(QPalette::Text));
+    result->setMinorGridLineVisible(false);
     result->setGridLineColor(colours::faint(palette));
     result->setLinePenColor(palette.color(QPalette::Text));
     return result;
+}
+
+bool sameAxis(const ChartAxis& a, const ChartAxis& b) {
+    return a.title == b.title && a.from == b.from && a.to == b.to;
+}
+
+bool sameAxesAndKinds(const ChartModel& a, const ChartModel& b) {
+    return sameAxis(a.x, b.x) && sameAxis(a.y, b.y) &&
+           std::equal(a.series.begin(), a.series.end(), b.series.begin(), b.series.end(),
+                      [](const ChartSeries& s, const ChartSeries& t) {
+                          return s.kind == t.kind && s.name == t.name;
+                      });
 }
 
 }  // namespace
@@ -74,6 +87,9 @@ ChartWidget::ChartWidget(QWidget* parent)
     view->setRenderHint(QPainter::Antialiasing);
     view->setFrameShape(QFrame::NoFrame);
     view->setFocusPolicy(Qt::NoFocus);
+    // Small update regions make every line item rasterize against a ragged clip: tens of milliseconds a
+    // frame.
+    view->setViewportUpdateMode(QGraphicsView::FullViewportUpdate);
     view->setMinimumHeight(fontMetrics().height() * 9);
     chart_->setAnimationOptions(QChart::NoAnimation);
     chart_->setMargins({4, 0, fontMetrics().averageCharWidth() * 3, 0});
@@ -107,14 +123,17 @@ ChartWidget::ChartWidget(QWidget* parent)
 }
 
 void ChartWidget::show(const ChartModel& model) {
+    const bool sameFrame = sameAxesAndKinds(model, model_);
     model_ = model;
     title_->setText(model.title);
     setAccessibleName(model.title);
     setAccessibleDescription(model.summary);
-    rebuild();
+    if (!sameFrame) rebuild();
+    fillSeries();
     if (asTable_->isChecked()) fillTable();
 }
 
+/// New axes and series; costs tens of milliseconds, so it is done only when they change.
 void ChartWidget::rebuild() {
     chart_->removeAllSeries();
     for (QAbstractAxis* axis : chart_->axes()) {
@@ -130,15 +149,22 @@ void ChartWidget::rebuild() {
     chart_->addAxis(y, Qt::AlignLeft);
     for (const ChartSeries& series : model_.series) {
         auto* line = new QLineSeries;
-        QList<QPointF> points;
-        for (const ChartPoint& point : series.points)
-            points.append({std::log10(point.x), std::log10(point.y)});
-        line->replace(points);
         line->setName(series.name);
         line->setPen(penOf(series.kind, palette()));
         chart_->addSeries(line);
         line->attachAxis(x);
         line->attachAxis(y);
+    }
+}
+
+void ChartWidget::fillSeries() {
+    const QList<QAbstractSeries*> lines = chart_->series();
+    for (qsizetype i = 0; i < lines.size(); ++i) {
+        QList<QPointF> points;
+        for (const ChartPoint& point : model_.series[static_cast<std::size_t>(i)].points)
+            points.append({std::log10(point.x), std::log10(point.y)});
+        auto* line = qobject_cast<QLineSeries*>(lines[i]);
+        if (line->points() != points) line->replace(points);
     }
 }
 
@@ -170,6 +196,9 @@ QPointF ChartWidget::positionOf(const ChartPoint& point) const {
 }
 
 void ChartWidget::changeEvent(QEvent* event) {
-    if (event->type() == QEvent::PaletteChange) rebuild();
+    if (event->type() == QEvent::PaletteChange) {
+        rebuild();
+        fillSeries();
+    }
     QWidget::changeEvent(event);
 }

@@ -27,6 +27,7 @@ class ChartWidget : public QWidget {
 
   private:
     void rebuild();
+    void fillSeries();
     void fillTable();
     ChartModel model_;
     QChart* chart_;
