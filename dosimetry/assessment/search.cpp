@@ -65,11 +65,14 @@ OuterEdge outer_edge(Length nearest, Length farthest, const std::vector<Length>&
     std::vector<double> grid_m;
     const double decades = std::log10(farthest / nearest);
     const int steps = static_cast<int>(std::ceil(decades * steps_per_decade));
-    for (int i = 0; i <= steps; ++i) grid_m.push_back(nearest.in_si() * std::pow(10.0, decades * i / steps));
-    grid_m.back() = farthest.in_si();
+    const double step = std::pow(10.0, decades / steps);
+    for (double m = nearest.in_si(); static_cast<int>(grid_m.size()) < steps; m *= step) grid_m.push_back(m);
+    grid_m.push_back(farthest.in_si());
+    const auto regular = static_cast<std::ptrdiff_t>(grid_m.size());
     for (Length length : extra)
         if (length > nearest && length < farthest) grid_m.push_back(length.in_si());
-    std::sort(grid_m.begin(), grid_m.end());
+    std::sort(grid_m.begin() + regular, grid_m.end());
+    std::inplace_merge(grid_m.begin(), grid_m.begin() + regular, grid_m.end());
 
     const auto at = [&](double m) { return ratio(metres(m)); };
     const auto edge_between = [&](Point inside, Point outside) {

@@ -4,6 +4,7 @@
 #include <CLI/CLI.hpp>
 #include <cstdio>
 #include <exception>
+#include <stdexcept>
 #include <string>
 
 #include "documents/files.h"
@@ -21,6 +22,13 @@ void print(std::FILE* stream, const std::string& text) {
     std::fwrite(text.data(), 1, text.size(), stream);
 }
 
+/// A result that did not arrive whole (a full disk) must not pass for one.
+void print_result(const std::string& text) {
+    print(stdout, text);
+    if (std::fflush(stdout) != 0 || std::ferror(stdout) != 0)
+        throw std::runtime_error("the result cannot be written to standard output");
+}
+
 void complain(const dosimetry::TextPosition& where, const std::string& sentence) {
     print(stderr, dosimetry::InputError(sentence, "", "", where).what() + std::string("\n"));
 }
@@ -34,8 +42,8 @@ int assess_file(const std::string& name, bool json) {
     for (const Uncovered& u : assessment.uncovered)
         complain(document.place_of(u.key, shown_name), "not covered: " + u.reason);
     if (!assessment.covered()) return not_assessed;
-    print(stdout, json ? result_json(document.setup, assessment, document.sha256)
-                       : report(document.setup, assessment));
+    print_result(json ? result_json(document.setup, assessment, document.sha256)
+                      : report(document.setup, assessment));
     return assessment.within_limits() ? within : exceeded;
 }
 

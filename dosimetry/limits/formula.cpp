@@ -141,7 +141,11 @@ class FormulaCompiler {
 };
 
 Formula::Formula(std::string_view text, std::span<const std::string> names)
-    : text_(text), steps_(FormulaCompiler(text, names).compile()) {}
+    : text_(text), steps_(FormulaCompiler(text, names).compile()) {
+    for (const Step& step : steps_)
+        if (step.op == Op::name && std::find(used_.begin(), used_.end(), step.name) == used_.end())
+            used_.push_back(step.name);
+}
 
 double Formula::value(std::span<const double> values) const {
     std::array<double, deepest + 1> stack{};
@@ -199,14 +203,6 @@ std::string Formula::with_numbers(std::span<const std::string> names, std::span<
         }
     }
     return result;
-}
-
-std::vector<std::size_t> Formula::used() const {
-    std::vector<std::size_t> indices;
-    for (const Step& step : steps_)
-        if (step.op == Op::name && std::find(indices.begin(), indices.end(), step.name) == indices.end())
-            indices.push_back(step.name);
-    return indices;
 }
 
 std::string pretty_formula(std::string_view text) {

@@ -21,7 +21,7 @@ class Formula {
     /// The formula with the numbers put in for the names, nine significant digits: "10^(0.002·(905 − 700))".
     std::string with_numbers(std::span<const std::string> names, std::span<const double> values) const;
     /// Indices of the names it uses.
-    std::vector<std::size_t> used() const;
+    const std::vector<std::size_t>& used() const { return used_; }
 
   private:
     enum class Op { number, name, add, subtract, multiply, divide, power, negate };
@@ -33,6 +33,7 @@ class Formula {
     friend class FormulaCompiler;
     std::string text_;
     std::vector<Step> steps_;  // postfix
+    std::vector<std::size_t> used_;
 };
 
 /// A formula as it is shown: signs of mathematics in place of those of the keyboard.

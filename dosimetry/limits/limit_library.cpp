@@ -1,14 +1,23 @@
 #include "limits/limit_library.h"
 
+#include <utility>
+
 #include "limits/embedded_tables.h"
+#include "quantities/input_error.h"
 
 namespace dosimetry {
 
 const LimitLibrary& LimitLibrary::embedded() {
     static const LimitLibrary library = [] {
         LimitLibrary l;
-        for (const EmbeddedTable& table : embedded_tables())
-            l.sets_.push_back(LimitSet::read(table.bytes, std::string(table.file_name)));
+        for (const EmbeddedTable& table : embedded_tables()) {
+            const std::string name(table.file_name);
+            LimitSet set = LimitSet::read(table.bytes, name);
+            if (name != set.edition().id + ".toml")
+                throw InputError("the edition in this file is called " + quoted(set.edition().id),
+                                 "an id equal to the file's name", "edition.id", {name, 1, 1});
+            l.sets_.push_back(std::move(set));
+        }
         return l;
     }();
     return library;

@@ -198,9 +198,8 @@ std::variant<std::vector<Limit>, NotCovered> LimitSet::limits_for(const LimitQue
         limit.aperture = millimetres(aperture_mm(row, values));
         if (is_retinal(row.effect)) {
             limit.subtense = query.subtense;
-            for (std::size_t i = 0; i < factors_.size(); ++i)
-                if (factors_[i].symbol == "alpha_min")
-                    limit.subtense = std::max(limit.subtense, milliradians(factor_value(i, values)));
+            if (alpha_min_)
+                limit.subtense = std::max(limit.subtense, milliradians(factor_value(*alpha_min_, values)));
         }
         if (row.acceptance) limit.acceptance = milliradians(factor_value(*row.acceptance, values));
         limits.push_back(limit);

@@ -1,5 +1,6 @@
 #pragma once
 
+#include <optional>
 #include <string>
 #include <string_view>
 #include <variant>
@@ -98,6 +99,7 @@ class LimitSet {
     std::vector<Factor> factors_;
     std::vector<Aperture> apertures_;
     std::vector<LimitRow> rows_;
+    std::optional<std::size_t> alpha_min_;  ///< the factor of that symbol, below which no subtense is judged
 };
 
 /// Unit of a limit and its name, "W/m²" and "irradiance".

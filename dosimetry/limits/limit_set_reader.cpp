@@ -213,6 +213,9 @@ class LimitSetReader {
             FactorPiece piece;
             piece.from = bound(p.node("from"), "from", true);
             piece.to = bound(p.node("to"), "to", true);
+            if (!piece.from.factor && !piece.to.factor && !(piece.from.number < piece.to.number))
+                throw p.error("to", "the piece of " + factor.symbol + " does not ascend",
+                              "from less than to");
             piece.end_included = included(p, "end");
             piece.value = formula(p, "value", set_.names_);
             if (!factor.pieces.empty()) {
@@ -225,6 +228,7 @@ class LimitSetReader {
         }
         if (factor.pieces.empty())
             throw t.error("pieces", factor.symbol + " has no pieces", "pieces = [ … ]");
+        if (factor.symbol == "alpha_min") set_.alpha_min_ = set_.factors_.size();
         set_.names_.push_back(factor.symbol);
         set_.factors_.push_back(std::move(factor));
     }
@@ -239,6 +243,9 @@ class LimitSetReader {
     void read_aperture(const StrictTable& t) {
         Aperture aperture;
         aperture.id = t.text("id");
+        for (const Aperture& other : set_.apertures_)
+            if (other.id == aperture.id)
+                throw t.error("id", "the aperture " + quoted(aperture.id) + " is given twice", "a new id");
         aperture.clause = clause(t);
         aperture.provenance = provenance(t);
         for (const StrictTable& p : t.tables("pieces", {"nm", "s", "diameter_mm"})) {
@@ -284,6 +291,11 @@ class LimitSetReader {
             row.effect = effect;
             row.aperture = static_cast<std::size_t>(aperture - set_.apertures_.begin());
             row.alternative_form = section.alternative_form;
+            const bool radiance_form =
+                row.quantity == LimitQuantity::radiance || row.quantity == LimitQuantity::radiance_dose;
+            if (radiance_form && !row.alternative_form)
+                throw r.error("", "a row in D or L stands alone",
+                              "alternative_form = true, beside rows in H or E");
             row.clause = r.has("clause") ? clause(r) : clause(t);
             check_definitions(row, r);
             set_.rows_.push_back(std::move(row));
@@ -321,6 +333,9 @@ class LimitSetReader {
         if (r.has("alpha_mrad")) std::tie(row.alpha_from_mrad, row.alpha_to_mrad) = range(r, "alpha_mrad");
         read_value(r, row);
         row.t_power = r.maybe_number("t_power").value_or(0.0);
+        // The search for the permitted exposure relies on no limit growing faster than the exposure itself.
+        if (!(row.t_power >= 0.0 && row.t_power <= 1.0))
+            throw r.error("t_power", "the power of t is " + shortest(row.t_power), "from 0 to 1");
         if (r.has("factors"))
             for (const std::string& text : r.texts("factors")) row.factors.push_back(factor_power(r, text));
         if (const auto symbol = r.maybe_text("acceptance")) row.acceptance = factor_power(r, *symbol).factor;
@@ -408,7 +423,16 @@ class LimitSetReader {
                               row.s_to.factor ? e.s_to : row.s_to.number};
         for (const auto& index : {row.s_from.factor, row.s_to.factor})
             if (index) check_end(*index, r);
-        for (std::size_t index : factors_of(row))
+        std::vector<std::size_t> factors = factors_of(row);
+        const bool retinal =
+            row.effect == Effect::retinal_thermal || row.effect == Effect::retinal_photochemical;
+        if (retinal && set_.alpha_min_) {  // the subtense is never judged below it
+            std::vector<bool> needed(set_.factors_.size());
+            needed[*set_.alpha_min_] = true;
+            const std::vector<std::size_t> more = with_their_own(std::move(needed));
+            factors.insert(factors.end(), more.begin(), more.end());
+        }
+        for (std::size_t index : factors)
             if (!defined_over(set_.factors_[index], whole))
                 throw r.error(
                     "factors",

@@ -200,8 +200,7 @@ const Named* find_name(Dimension dimension) {
 ReadQuantity read_quantity(std::string_view text, DecimalMark mark) {
     const std::string given(text);
     std::string_view rest = trimmed(text);
-    if (rest.empty())
-        throw InputError("the text is empty", "a number and a unit");
+    if (rest.empty()) throw InputError("the text is empty", "a number and a unit");
     const std::size_t length = number_prefix_length(rest);
     if (length == 0 || (length == 1 && (rest[0] == '-' || rest[0] == '+')))
         throw InputError(quoted(given) + " does not start with a number", "a number and a unit");

@@ -6,6 +6,7 @@
 #include <utility>
 
 #include "quantities/decimal.h"
+#include "toml/key_depth.h"
 
 namespace dosimetry {
 namespace {
@@ -117,6 +118,10 @@ toml::table parse_toml(std::string_view bytes, const std::string& file_name, std
     if (bad != std::string_view::npos)
         throw InputError("the file is not encoded in UTF-8", "a TOML text file in UTF-8", "",
                          position_at(bytes, bad, file_name));
+    constexpr int most_dots = 16;
+    if (const auto deep = too_deep_key(bytes, most_dots); deep != std::string_view::npos)
+        throw InputError("a key has more than " + std::to_string(most_dots) + " dots",
+                         "keys such as source.beam", "", position_at(bytes, deep, file_name));
     try {
         return toml::parse(bytes, file_name);
     } catch (const toml::parse_error& error) {

@@ -1,0 +1,2 @@
+// A sample that the check must refuse; nothing compiles it.
+#include <QString>
