@@ -4,6 +4,7 @@
 #include <CLI/CLI.hpp>
 #include <QApplication>
 #include <QFile>
+#include <QFileInfo>
 #include <cstdio>
 
 #include "documents/files.h"
@@ -22,6 +23,9 @@ constexpr int notWritten = 2;
 int writeSheet(const std::string& output, const std::string& input, const std::string& paper) {
     using namespace dosimetry;
     try {
+        if (QFileInfo(QFile::decodeName(output.c_str())) == QFileInfo(QFile::decodeName(input.c_str())))
+            throw InputError("the sheet would replace the assessment file", "another name for the sheet", "",
+                             {output, 0, 0});
         const LimitLibrary& library = LimitLibrary::embedded();
         const std::string bytes = read_file(input);
         const SetupDocument document = read_setup(bytes, input, library);
@@ -74,7 +78,7 @@ int main(int argc, char** argv) {
     Recovery recovery(session, Recovery::usualFolder());
     MainWindow window(session);
     window.show();
-    if (const auto leftover = recovery.takeLeftover()) window.offerRecovery(leftover->setup, leftover->path);
+    window.offerRecovery(recovery);
     if (!file.empty()) window.openFile(QFile::decodeName(file.c_str()));
     return QApplication::exec();
 }

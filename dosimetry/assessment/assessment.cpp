@@ -160,6 +160,18 @@ PositionAssessment assess_position(const Context& c, const PositionSetup& stated
     return position;
 }
 
+/// Whoever leaves a tissue out should know that it is in danger.
+void add_unassessed_cautions(const Context& c, std::vector<std::string>& cautions) {
+    for (const PositionSetup& p : c.setup.positions)
+        for (Tissue tissue : both_tissues) {
+            if (p.has(tissue)) continue;
+            const Arrival arrival(c.laser, p.at.value);
+            const double ratio = largest_ratio(std::get<std::vector<Evaluated>>(
+                evaluate(arrival, p.exposure.value, tissue, *c.sets.front())));
+            if (ratio > 1.0) cautions.insert(cautions.begin(), unassessed_caution(p, tissue, ratio));
+        }
+}
+
 void find_hazard_distances(const Context& c, std::vector<HazardDistance>& distances) {
     std::vector<Stated<Duration>> exposures;
     for (const PositionSetup& p : c.setup.positions)
@@ -225,6 +237,7 @@ Assessment assess(const Setup& setup, const LimitLibrary& library, Trails trails
     if (!result.uncovered.empty()) return result;
     for (const PositionSetup& position : setup.positions)
         result.positions.push_back(assess_position(context, position));
+    add_unassessed_cautions(context, result.cautions);
     find_hazard_distances(context, result.hazard_distances);
     return result;
 }

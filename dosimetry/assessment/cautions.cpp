@@ -32,16 +32,7 @@ std::string short_exposure_caution(const PositionSetup& position, Length wavelen
 }  // namespace
 
 std::vector<std::string> cautions_for(const Setup& setup, const std::vector<const LimitSet*>& sets) {
-    std::vector<std::string> cautions{
-        "This calculation supports a competent person and does not replace one. Local law and site rules "
-        "come first; "
-        "the appointed laser or optical-radiation safety officer decides.",
-        "Exposure limits protect healthy adults. They do not protect patients under treatment, infants, "
-        "people without "
-        "a natural lens, or people whom a medicine has made sensitive to light.",
-        "Never look into a beam. Measure wherever a value or the model is uncertain.",
-        "Hazards other than the beam (electrical, chemical, fire, noise) are not calculated here.",
-    };
+    std::vector<std::string> cautions;
     for (const LimitSet* set : sets)
         if (!set->edition().text_read)
             cautions.push_back(set->edition().id + ": " + set->edition().text_note);
@@ -60,7 +51,24 @@ std::vector<std::string> cautions_for(const Setup& setup, const std::vector<cons
                                "). Check diameter, divergence and where they are measured; as given, "
                                "distances come out too long.");
     }
+    const std::vector<std::string> general{
+        "This calculation supports a competent person and does not replace one. Local law and site rules "
+        "come first; "
+        "the appointed laser or optical-radiation safety officer decides.",
+        "Exposure limits protect healthy adults. They do not protect patients under treatment, infants, "
+        "people without "
+        "a natural lens, or people whom a medicine has made sensitive to light.",
+        "Never look into a beam. Measure wherever a value or the model is uncertain.",
+        "Hazards other than the beam (electrical, chemical, fire, noise) are not calculated here.",
+    };
+    cautions.insert(cautions.end(), general.begin(), general.end());
     return cautions;
+}
+
+std::string unassessed_caution(const PositionSetup& position, Tissue tissue, double ratio) {
+    return "Position \"" + position.id + "\": the " + name_of(tissue) +
+           " is not assessed, but it would receive " + format_number(ratio, 3, Rounding::up) +
+           " times its limit there.";
 }
 
 std::vector<std::string> assumptions_for(const Setup& setup) {
@@ -92,6 +100,9 @@ std::vector<std::string> assumptions_for(const Setup& setup) {
     assumptions.push_back(
         "Nobody uses binoculars, a loupe or another viewing aid, and nobody wears protective eyewear.");
     assumptions.push_back("The stated exposure is the only one of the day.");
+    assumptions.push_back(
+        "An optical density named here is what the limits ask for; whether eyewear or windows withstand the "
+        "beam is another question.");
     return assumptions;
 }
 

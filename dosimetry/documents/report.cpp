@@ -1,4 +1,5 @@
 #include <algorithm>
+#include <cmath>
 
 #include "beams/names.h"
 #include "documents/result.h"
@@ -6,13 +7,6 @@
 
 namespace dosimetry {
 namespace {
-
-std::string up(const LimitValue& value) {
-    return std::visit([](auto q) { return format(q, 4, Rounding::up); }, value);
-}
-std::string down(const LimitValue& value) {
-    return std::visit([](auto q) { return format(q, 4, Rounding::down); }, value);
-}
 
 /// Number of characters shown, for columns: continuation bytes of UTF-8 take no room.
 std::size_t width(const std::string& text) {
@@ -86,17 +80,15 @@ void position_part(std::string& out, const PositionAssessment& p) {
     for (const Criterion& c : p.criteria) {
         const bool governs = &c == p.governing_criterion();
         out += (governs ? "> " : "  ") + padded(name_of(c.tissue, c.effect), 34) +
-               padded(up(c.exposure), 20) + padded(down(c.limit), 20) +
+               padded(exposure_text(c), 20) + padded(limit_text(c), 20) +
                padded(format_number(c.ratio, 4, Rounding::up), 12) + c.limit_set + ", " + c.clause + "\n";
     }
     row(out, "irradiance on the axis", format(p.peak_irradiance, 4, Rounding::up));
     row(out, "photons per area", format(p.photons_per_area, 4, Rounding::up) + " on the axis");
-    row(out, "longest permitted exposure", permitted_exposure_text(p));
-    row(out, "highest permitted power", format(p.permitted_power, 4, Rounding::down));
-    if (p.required_density_eye)
-        row(out, "optical density, eye", format_number(*p.required_density_eye, 3, Rounding::up));
-    if (p.required_density_skin)
-        row(out, "optical density, skin", format_number(*p.required_density_skin, 3, Rounding::up));
+    row(out, "longest permitted exposure", permitted_exposure_text(p) + tissue_remark(p));
+    row(out, "highest permitted power", format(p.permitted_power, 4, Rounding::down) + tissue_remark(p));
+    if (p.required_density_eye) row(out, "optical density, eye", density_text(*p.required_density_eye));
+    if (p.required_density_skin) row(out, "optical density, skin", density_text(*p.required_density_skin));
 }
 
 }  // namespace
@@ -105,15 +97,35 @@ std::string name_of(Tissue tissue, Effect effect) {
     return name_of(tissue) + ", " + (effect == Effect::skin_thermal ? "thermal" : name_of(effect));
 }
 
+std::string exposure_text(const Criterion& c) {
+    return std::visit([](auto q) { return format(q, 4, Rounding::up); }, c.exposure);
+}
+
+std::string limit_text(const Criterion& c) {
+    return std::visit([](auto q) { return format(q, 4, Rounding::down); }, c.limit);
+}
+
+std::string density_text(double density) {
+    const long hundredths = std::lround(std::ceil(density * 100.0 * (1.0 - 1e-12)));
+    if (hundredths == 0) return "0";
+    const std::string decimals = std::to_string(hundredths % 100);
+    return std::to_string(hundredths / 100) + "." + (decimals.size() < 2 ? "0" : "") + decimals;
+}
+
+std::string tissue_remark(const PositionAssessment& p) {
+    return p.eye && p.skin ? "" : p.eye ? " (eye only)" : " (skin only)";
+}
+
 std::string verdict(const PositionAssessment& p) {
-    const std::string what = name_of(p.governing.tissue);
-    const std::string effect = " (" + name_of(p.governing.effect) + ").";
-    const std::string where = "At " + p.at.text;
-    if (p.governing.ratio > 1.0)
-        return where + " the " + what + " would receive " +
-               format_number(p.governing.ratio, 4, Rounding::up) + " times the limit" + effect;
-    return where + " the " + what + " would receive at most " +
-           format_number(p.governing.ratio, 3, Rounding::up) + " of the limit" + effect;
+    const bool above = p.governing.ratio > 1.0;
+    std::string text = above ? "ABOVE THE LIMIT. " : "Within the limits. ";
+    text += "At " + p.at.text + " the " + name_of(p.governing.tissue) + " would receive ";
+    text += above ? format_number(p.governing.ratio, 4, Rounding::up) + " times the limit"
+                  : "at most " + format_number(p.governing.ratio, 3, Rounding::up) + " of the limit";
+    text += " (" + name_of(p.governing.effect) + ").";
+    if (!p.eye) text += " The eye is NOT assessed.";
+    if (!p.skin) text += " The skin is NOT assessed.";
+    return text;
 }
 
 std::string distance_text(const HazardDistance& d) {

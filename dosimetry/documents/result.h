@@ -20,8 +20,19 @@ std::string report(const Setup& setup, const Assessment& assessment);
 /// "eye, retinal thermal", "skin, thermal"
 std::string name_of(Tissue tissue, Effect effect);
 
-/// A verdict in one sentence: "At 0.5 m the eye would receive 5104 times the limit (retinal thermal)."
+/// The two values of a criterion, four digits: exposures rounded up, limits down.
+std::string exposure_text(const Criterion& criterion);
+std::string limit_text(const Criterion& criterion);
+
+/// An optical density rounded up to two decimals.
+std::string density_text(double density);
+
+/// The verdict on a position in words that need no colour: "ABOVE THE LIMIT. At 0.5 m the eye would receive
+/// 5104 times the limit (retinal thermal)." A tissue that is not assessed is named.
 std::string verdict(const PositionAssessment& position);
+
+/// " (eye only)" where the other tissue is not assessed, otherwise empty.
+std::string tissue_remark(const PositionAssessment& position);
 
 /// "none", "beyond 1000 km", or the distance rounded up.
 std::string distance_text(const HazardDistance& distance);

@@ -1,6 +1,7 @@
 #include "charts/chart_model.h"
 
 #include <algorithm>
+#include <array>
 #include <cmath>
 
 QString powerOfTen(int exponent) {
@@ -31,17 +32,27 @@ void fitToDecades(ChartModel& model) {
 
 std::vector<ChartPoint> thinned(const std::vector<ChartPoint>& points) {
     constexpr double tolerance = 5e-4;  // of the value; a pixel is some percent of it on any chart
-    std::vector<ChartPoint> kept;
-    for (std::size_t i = 0; i < points.size(); ++i) {
-        const bool end = i == 0 || i + 1 == points.size();
-        if (!end) {
-            const ChartPoint& a = kept.back();
-            const ChartPoint& c = points[i + 1];
-            const double share = std::log(points[i].x / a.x) / std::log(c.x / a.x);
-            const double straight = std::log(a.y) + share * std::log(c.y / a.y);
-            if (std::fabs(straight - std::log(points[i].y)) < tolerance) continue;
+    if (points.size() < 3) return points;
+    // From the last kept point on, the slopes of straight lines that pass all points since then within the
+    // tolerance.
+    std::vector<ChartPoint> kept{points.front()};
+    double lowest = -HUGE_VAL;
+    double highest = HUGE_VAL;
+    for (std::size_t i = 1; i < points.size(); ++i) {
+        const auto slopes = [&] {
+            const double dx = std::log(points[i].x / kept.back().x);
+            const double dy = std::log(points[i].y / kept.back().y);
+            return std::array{(dy - tolerance) / dx, dy / dx, (dy + tolerance) / dx};
+        };
+        if (const double slope = slopes()[1]; slope < lowest || slope > highest) {
+            kept.push_back(points[i - 1]);
+            lowest = -HUGE_VAL;
+            highest = HUGE_VAL;
         }
-        kept.push_back(points[i]);
+        const auto [low, exact, high] = slopes();
+        lowest = std::max(lowest, low);
+        highest = std::min(highest, high);
     }
+    kept.push_back(points.back());
     return kept;
 }

@@ -29,11 +29,12 @@ constexpr int mostLabels = 8;
 QPen penOf(ChartSeries::Kind kind, const QPalette& palette) {
     switch (kind) {
         case ChartSeries::Kind::eyeExposure:
-            return QPen(colours::eyeZone(palette), 2.6);
+            return QPen(colours::eyeZone(palette),
+                        5.0);  // wide, so that it shows under the skin's where both coincide
         case ChartSeries::Kind::eyeLimit:
             return QPen(colours::eyeZone(palette), 1.6, Qt::DashLine);
         case ChartSeries::Kind::skinExposure:
-            return QPen(colours::skinZone(palette), 2.6);
+            return QPen(colours::skinZone(palette), 1.6);
         case ChartSeries::Kind::skinLimit:
             return QPen(colours::skinZone(palette), 1.6, Qt::DashDotLine);
         case ChartSeries::Kind::mark:
@@ -98,6 +99,7 @@ ChartWidget::ChartWidget(QWidget* parent)
     chart_->legend()->setMarkerShape(QLegend::MarkerShapeFromSeries);
     table_->setEditTriggers(QAbstractItemView::NoEditTriggers);
     table_->setTabKeyNavigation(false);
+    table_->setAccessibleName(tr("Numbers of the chart"));
     table_->verticalHeader()->hide();
     pages_->addWidget(view);
     pages_->addWidget(table_);
@@ -173,20 +175,23 @@ void ChartWidget::fillTable() {
     table_->clear();
     table_->setColumnCount(3);
     table_->setHorizontalHeaderLabels({tr("Series"), model_.x.title, model_.y.title});
-    int rows = 0;
-    for (const ChartSeries& series : model_.series) rows += static_cast<int>(series.points.size());
-    table_->setRowCount(rows);
-    int row = 0;
-    for (const ChartSeries& series : model_.series)
+    table_->setRowCount(0);
+    for (const ChartSeries& series : model_.series) {
+        if (series.kind == ChartSeries::Kind::mark) continue;
+        const bool limit =
+            series.kind == ChartSeries::Kind::eyeLimit || series.kind == ChartSeries::Kind::skinLimit;
         for (const ChartPoint& point : series.points) {
-            table_->setItem(row, 0, new QTableWidgetItem(series.name));
-            const auto number = [](double v) {
-                return QString::fromStdString(dosimetry::format_number(v, 4, dosimetry::Rounding::nearest));
+            const int row = table_->rowCount();
+            table_->insertRow(row);
+            const auto number = [](double v, dosimetry::Rounding rounding) {
+                return new QTableWidgetItem(QString::fromStdString(dosimetry::format_number(v, 4, rounding)));
             };
-            table_->setItem(row, 1, new QTableWidgetItem(number(point.x)));
-            table_->setItem(row, 2, new QTableWidgetItem(number(point.y)));
-            ++row;
+            table_->setItem(row, 0, new QTableWidgetItem(series.name));
+            table_->setItem(row, 1, number(point.x, dosimetry::Rounding::nearest));
+            table_->setItem(row, 2,
+                            number(point.y, limit ? dosimetry::Rounding::down : dosimetry::Rounding::up));
         }
+    }
     table_->resizeColumnsToContents();
 }
 

@@ -11,7 +11,9 @@ std::string nonEmpty(const std::string& text) {
 }
 
 FieldBinding dateBinding() {
-    return {"date", QObject::tr("date"), [](const dosimetry::Setup& s) { return s.date; },
+    return {"date",
+            QObject::tr("date"),
+            [](const dosimetry::Setup& s) { return s.date; },
             [](dosimetry::Setup& s, const std::string& text) {
                 const bool valid = QDate::fromString(QString::fromStdString(text), Qt::ISODate).isValid() &&
                                    text.size() == 10;
@@ -19,5 +21,7 @@ FieldBinding dateBinding() {
                     throw dosimetry::InputError(dosimetry::quoted(text) + " is not a date",
                                                 "YYYY-MM-DD, such as 2026-12-01");
                 s.date = text;
-            }};
+            },
+            FieldBinding::Content::text,
+            QObject::tr("YYYY-MM-DD")};
 }

@@ -29,13 +29,14 @@ void AnswersModel::reload() {
                 add(d.tissue == Tissue::eye ? tr("Hazard distance, eye (NOHD)") : tr("Hazard distance, skin"),
                     distance_text(d), d.trail);
         if (p.required_density_eye)
-            add(tr("Optical density needed, eye"), format_number(*p.required_density_eye, 3, Rounding::up),
+            add(tr("Optical density needed, eye"), density_text(*p.required_density_eye),
                 p.density_trail_eye);
         if (p.required_density_skin)
-            add(tr("Optical density needed, skin"), format_number(*p.required_density_skin, 3, Rounding::up),
+            add(tr("Optical density needed, skin"), density_text(*p.required_density_skin),
                 p.density_trail_skin);
-        add(tr("Longest permitted exposure"), permitted_exposure_text(p), p.permitted_exposure_trail);
-        add(tr("Highest permitted power"), format(p.permitted_power, 4, Rounding::down),
+        add(tr("Longest permitted exposure"), permitted_exposure_text(p) + tissue_remark(p),
+            p.permitted_exposure_trail);
+        add(tr("Highest permitted power"), format(p.permitted_power, 4, Rounding::down) + tissue_remark(p),
             p.permitted_power_trail);
         add(tr("Photons per area, on the axis"), format(p.photons_per_area, 4, Rounding::up),
             p.photons_trail);

@@ -17,6 +17,7 @@ class AnswersModel : public QAbstractTableModel {
     int rowCount(const QModelIndex& parent = {}) const override;
     int columnCount(const QModelIndex& parent = {}) const override;
     QVariant data(const QModelIndex& index, int role = Qt::DisplayRole) const override;
+    QString labelOf(int row) const { return answers_[static_cast<std::size_t>(row)].label; }
     const dosimetry::Trail& trailOf(int row) const { return *answers_[static_cast<std::size_t>(row)].trail; }
 
   private:

@@ -9,14 +9,6 @@
 
 using namespace dosimetry;
 
-namespace {
-
-QString shown(const LimitValue& value, Rounding rounding) {
-    return QString::fromStdString(std::visit([&](auto q) { return format(q, 4, rounding); }, value));
-}
-
-}  // namespace
-
 MarginsModel::MarginsModel(Session& session, QObject* parent)
     : QAbstractTableModel(parent), session_(session) {
     connect(&session, &Session::setupChanged, this, &MarginsModel::reload);
@@ -91,7 +83,8 @@ QVariant MarginsModel::data(const QModelIndex& index, int role) const {
         case RatioColumn:
             return ratio + QStringLiteral(" ×");
         case ValuesColumn:
-            return tr("%1\nlimit %2").arg(shown(c.exposure, Rounding::up), shown(c.limit, Rounding::down));
+            return tr("%1\nlimit %2")
+                .arg(QString::fromStdString(exposure_text(c)), QString::fromStdString(limit_text(c)));
         default:
             return {};
     }

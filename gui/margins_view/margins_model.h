@@ -21,6 +21,9 @@ class MarginsModel : public QAbstractTableModel {
     int columnCount(const QModelIndex& parent = {}) const override;
     QVariant data(const QModelIndex& index, int role = Qt::DisplayRole) const override;
     QVariant headerData(int section, Qt::Orientation orientation, int role = Qt::DisplayRole) const override;
+    const dosimetry::Criterion& criterionOf(int row) const {
+        return *criteria_[static_cast<std::size_t>(row)];
+    }
     const dosimetry::Trail& trailOf(int row) const { return criteria_[static_cast<std::size_t>(row)]->trail; }
 
   private:

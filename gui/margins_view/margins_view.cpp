@@ -26,6 +26,11 @@ QTableView* plainTable(QAbstractItemModel* model) {
     return table;
 }
 
+QString nameOf(const dosimetry::Criterion& c) {
+    return QString::fromStdString(c.limit_set + ": " + dosimetry::name_of(c.tissue) + ", " +
+                                  dosimetry::name_of(c.effect));
+}
+
 }  // namespace
 
 MarginsView::MarginsView(Session& session, QWidget* parent)
@@ -53,6 +58,8 @@ MarginsView::MarginsView(Session& session, QWidget* parent)
     answersTable_->horizontalHeader()->setSectionResizeMode(1, QHeaderView::Stretch);
     answersTable_->verticalHeader()->setSectionResizeMode(QHeaderView::ResizeToContents);
     uncovered_->setWordWrap(true);
+    uncovered_->setTextFormat(Qt::PlainText);
+    heading_->setTextFormat(Qt::PlainText);
     uncovered_->setObjectName("uncovered");
     QFont bold = heading_->font();
     bold.setBold(true);
@@ -65,21 +72,22 @@ MarginsView::MarginsView(Session& session, QWidget* parent)
     layout->addWidget(marginsTable_, 2);
     layout->addWidget(answersTable_, 3);
 
+    const auto choose = [this](QTableView* other, const QString& name, const dosimetry::Trail& trail) {
+        chosen_ = name;
+        other->clearSelection();
+        other->setCurrentIndex({});
+        emit trailChosen(trail);
+    };
     connect(marginsTable_->selectionModel(), &QItemSelectionModel::currentRowChanged, this,
-            [this](const QModelIndex& row) {
-                if (!row.isValid()) return;
-                chosenMargin_ = row.row();
-                chosenAnswer_ = -1;
-                answersTable_->clearSelection();
-                emit trailChosen(margins_->trailOf(row.row()));
+            [this, choose](const QModelIndex& row) {
+                if (row.isValid())
+                    choose(answersTable_, nameOf(margins_->criterionOf(row.row())),
+                           margins_->trailOf(row.row()));
             });
     connect(answersTable_->selectionModel(), &QItemSelectionModel::currentRowChanged, this,
-            [this](const QModelIndex& row) {
-                if (!row.isValid()) return;
-                chosenAnswer_ = row.row();
-                chosenMargin_ = -1;
-                marginsTable_->clearSelection();
-                emit trailChosen(answers_->trailOf(row.row()));
+            [this, choose](const QModelIndex& row) {
+                if (row.isValid())
+                    choose(marginsTable_, answers_->labelOf(row.row()), answers_->trailOf(row.row()));
             });
     // The models were connected to the session first, so they hold the new rows by now.
     connect(&session, &Session::setupChanged, this, &MarginsView::showState);
@@ -102,13 +110,22 @@ void MarginsView::showState() {
     uncovered_->setText(reasons.join('\n'));
     uncovered_->setVisible(!reasons.isEmpty());
     marginsTable_->setVisible(reasons.isEmpty());
-    chooseAgain();
+    announceTrail();
 }
 
-/// Keeps the chosen row through an edit, so that its trail follows the new values.
-void MarginsView::chooseAgain() {
-    if (chosenMargin_ >= 0 && margins_->rowCount() > 0)
-        marginsTable_->selectRow(std::min(chosenMargin_, margins_->rowCount() - 1));
-    else if (answers_->rowCount() > 0)
-        answersTable_->selectRow(std::clamp(chosenAnswer_, 0, answers_->rowCount() - 1));
+/// The chosen number keeps its trail through an edit; where it no longer exists the governing criterion takes
+/// its place.
+void MarginsView::announceTrail() {
+    const QString wanted = chosen_;
+    marginsTable_->setCurrentIndex({});
+    answersTable_->setCurrentIndex({});
+    for (int row = 0; row < margins_->rowCount(); ++row)
+        if (nameOf(margins_->criterionOf(row)) == wanted) return marginsTable_->selectRow(row);
+    for (int row = 0; row < answers_->rowCount(); ++row)
+        if (answers_->labelOf(row) == wanted) return answersTable_->selectRow(row);
+    if (margins_->rowCount() > 0)
+        marginsTable_->selectRow(0);
+    else
+        answersTable_->selectRow(0);
+    if (!wanted.isEmpty()) chosen_ = wanted;  // it may come back with the next edit
 }

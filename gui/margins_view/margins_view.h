@@ -17,6 +17,8 @@ class MarginsView : public QWidget {
 
   public:
     explicit MarginsView(Session& session, QWidget* parent = nullptr);
+    /// Emits the trail of the chosen number again.
+    void announceTrail();
 
   signals:
     /// The trail of the chosen number; valid until the setup changes.
@@ -24,7 +26,6 @@ class MarginsView : public QWidget {
 
   private:
     void showState();
-    void chooseAgain();
     Session& session_;
     MarginsModel* margins_;
     AnswersModel* answers_;
@@ -32,6 +33,6 @@ class MarginsView : public QWidget {
     QLabel* uncovered_;
     QTableView* marginsTable_;
     QTableView* answersTable_;
-    int chosenMargin_ = 0;  ///< row, or -1 if an answer is chosen
-    int chosenAnswer_ = -1;
+    QString chosen_;  ///< which number, by name, so that an edit does not change it; empty: the governing
+                      ///< criterion
 };

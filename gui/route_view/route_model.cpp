@@ -15,13 +15,22 @@ namespace {
 
 constexpr int samples = 361;
 
-/// The farthest hazard distance for the exposure of the current position, or the end of the search.
-const HazardDistance* hazardDistance(const Assessment& assessment, Tissue tissue, Duration exposure) {
-    for (const HazardDistance& d : assessment.hazard_distances)
-        if (d.tissue == tissue && d.exposure.value == exposure &&
-            d.limit_set == assessment.limit_sets.front()->edition().id)
-            return &d;
-    return nullptr;
+double reachOf(const HazardDistance& d) {
+    return d.distance ? d.distance->in_si() : farthest_search.in_si();
+}
+
+/// The hazard distance that a tissue's zone is drawn for; null where nothing is covered.
+const HazardDistance* hazardDistance(const Setup& setup, const Assessment& assessment, Tissue tissue,
+                                     std::optional<int> position) {
+    const HazardDistance* chosen = nullptr;
+    for (const HazardDistance& d : assessment.hazard_distances) {
+        if (d.tissue != tissue || d.limit_set != setup.limits.front()) continue;
+        if (position &&
+            d.exposure.value != setup.positions[static_cast<std::size_t>(*position)].exposure.value)
+            continue;
+        if (!chosen || reachOf(d) > reachOf(*chosen)) chosen = &d;
+    }
+    return chosen;
 }
 
 Length decadeBelow(Length l) {
@@ -31,9 +40,11 @@ Length decadeAbove(Length l) {
     return metres(std::pow(10.0, std::ceil(std::log10(l.in_si()) - 1e-9)));
 }
 
-void addZones(RouteModel& model, const Assessment& assessment, const TissueCourse& course,
-              Duration exposure) {
-    const HazardDistance* edge = hazardDistance(assessment, course.tissue, exposure);
+std::string labelStart(const HazardDistance& edge) {
+    return name_of(edge.tissue) + ", " + edge.exposure.text + ": ";
+}
+
+void addZones(RouteModel& model, const TissueCourse& course, const HazardDistance& edge) {
     const auto& z = model.distances;
     for (std::size_t i = 0; i < z.size();) {
         if (course.ratio[i] <= 1.0) {
@@ -49,12 +60,11 @@ void addZones(RouteModel& model, const Assessment& assessment, const TissueCours
         zone.endsBehindAxis = end == z.size();
         zone.to = z[std::min(end, z.size() - 1)];
         // The last zone ends at the exact hazard distance, not at a sample.
-        if (edge && edge->distance && end < z.size() && *edge->distance <= z[end] &&
-            *edge->distance >= z[end - 1])
-            zone.to = *edge->distance;
-        zone.label = name_of(zone.tissue) + ": above the limit ";
+        if (edge.distance && end < z.size() && *edge.distance <= z[end] && *edge.distance >= z[end - 1])
+            zone.to = *edge.distance;
+        zone.label = labelStart(edge) + "above the limit ";
         if (!zone.startsBeforeAxis) zone.label += "from " + format(zone.from, 3, Rounding::down) + " ";
-        zone.label += zone.endsBehindAxis ? "beyond " + format(model.to, 3, Rounding::nearest)
+        zone.label += zone.endsBehindAxis ? "beyond " + format_round(model.to)
                                           : "up to " + format(zone.to, 4, Rounding::up);
         model.zones.push_back(zone);
         i = end;
@@ -63,70 +73,74 @@ void addZones(RouteModel& model, const Assessment& assessment, const TissueCours
 
 /// What stands where a tissue has no zone on the axis. Whether a limit is exceeded anywhere is the hazard
 /// distance's to say, not the samples'.
-void addRemark(RouteModel& model, const Assessment& assessment, Tissue tissue, Duration exposure) {
+void addRemark(RouteModel& model, Tissue tissue, const HazardDistance* edge) {
     for (const RouteZone& zone : model.zones)
         if (zone.tissue == tissue) return;
-    std::string text = name_of(tissue) + ": ";
-    const HazardDistance* edge = hazardDistance(assessment, tissue, exposure);
+    std::string text;
     if (!edge)
-        text += "not covered";
+        text = name_of(tissue) + ": not covered";
     else if (edge->distance && *edge->distance <= metres(0))
-        text += "within the limits along the whole beam";
+        text = labelStart(*edge) + "within the limits along the whole beam";
     else
-        text += "above the limit up to " + distance_text(*edge) + ", not drawn here";
+        text = labelStart(*edge) + "above the limit up to " + distance_text(*edge) + ", not drawn here";
     model.remarks.push_back({tissue, text});
 }
 
-RouteModel::Axis usualAxis(const Setup& setup, const Assessment& assessment, int currentPosition) {
-    const PositionSetup& current = setup.positions[static_cast<std::size_t>(currentPosition)];
-    Length nearest = current.at.value;
-    Length farthest = current.at.value;
-    for (const PositionSetup& p : setup.positions) {
-        nearest = std::min(nearest, p.at.value);
-        farthest = std::max(farthest, p.at.value);
+RouteModel::Axis usualAxis(const Setup& setup, const std::vector<const HazardDistance*>& edges) {
+    Length nearest = setup.positions.front().at.value;
+    Length farthest = nearest;
+    const auto hold = [&](Length l) {
+        nearest = std::min(nearest, l);
+        farthest = std::max(farthest, l);
+    };
+    for (const PositionSetup& p : setup.positions) hold(p.at.value);
+    for (const HazardDistance* edge : edges) {
+        if (!edge) continue;
+        if (!edge->distance)
+            hold(farthest_search);
+        else if (*edge->distance > metres(0))
+            hold(*edge->distance);
     }
-    for (Tissue tissue : {Tissue::eye, Tissue::skin})
-        if (const HazardDistance* d = hazardDistance(assessment, tissue, current.exposure.value)) {
-            if (!d->distance) {
-                farthest = std::max(farthest, farthest_search);
-            } else if (*d->distance > metres(0)) {
-                farthest = std::max(farthest, *d->distance);
-                nearest = std::min(nearest, *d->distance);
-            }
-        }
-    return {decadeBelow(std::min(nearest * 0.5, millimetres(100))),
-            decadeAbove(std::max(farthest * 1.3, metres(1)))};
+    // some room beside the outermost marks, but not beyond what is searched
+    const Length to = std::max(farthest, std::min(farthest * 1.3, farthest_search));
+    return {decadeBelow(std::min(nearest * 0.5, millimetres(100))), decadeAbove(std::max(to, metres(1)))};
 }
 
 }  // namespace
 
-RouteModel RouteModel::of(const Setup& setup, const Assessment& assessment, int currentPosition,
-                          const std::optional<Axis>& axis) {
+RouteModel RouteModel::of(const Setup& setup, const Assessment& assessment,
+                          std::optional<int> currentPosition, const std::optional<Axis>& axis) {
     RouteModel model;
-    const PositionSetup& current = setup.positions[static_cast<std::size_t>(currentPosition)];
-    std::tie(model.from, model.to) = axis ? *axis : usualAxis(setup, assessment, currentPosition);
+    const HazardDistance* eye = hazardDistance(setup, assessment, Tissue::eye, currentPosition);
+    const HazardDistance* skin = hazardDistance(setup, assessment, Tissue::skin, currentPosition);
+    std::tie(model.from, model.to) = axis ? *axis : usualAxis(setup, {eye, skin});
     model.sourceId = setup.sources.front().id;
 
-    std::vector<Length> distances = logarithmic_distances(model.from, model.to, samples);
-    const Length waist_at = make_laser(setup.sources.front()).beam.waist_at();
-    if (waist_at > model.from && waist_at < model.to)  // the narrowest place, easily between two samples
-        distances.insert(std::upper_bound(distances.begin(), distances.end(), waist_at), waist_at);
-    Course course =
-        course_along_beam(setup, LimitLibrary::embedded(), current.exposure.value, std::move(distances));
-    model.distances = std::move(course.distances);
-    model.diameters = std::move(course.diameters);
-    for (const TissueCourse& line : course.tissues) addZones(model, assessment, line, current.exposure.value);
-    for (Tissue tissue : {Tissue::eye, Tissue::skin})
-        addRemark(model, assessment, tissue, current.exposure.value);
-
     const CircularBeam beam = make_laser(setup.sources.front()).beam;
+    std::vector<Length> distances = logarithmic_distances(model.from, model.to, samples);
+    if (beam.waist_at() > model.from &&
+        beam.waist_at() < model.to)  // the narrowest place, easily between two samples
+        distances.insert(std::upper_bound(distances.begin(), distances.end(), beam.waist_at()),
+                         beam.waist_at());
+    model.distances = distances;
+    for (Length z : distances) model.diameters.push_back(beam.diameter_at(z));
+    for (const HazardDistance* edge : {eye, skin}) {
+        if (!edge) continue;
+        const Course course =
+            course_along_beam(setup, LimitLibrary::embedded(), edge->exposure.value, distances);
+        for (const TissueCourse& line : course.tissues)
+            if (line.tissue == edge->tissue) addZones(model, line, *edge);
+    }
+    addRemark(model, Tissue::eye, eye);
+    addRemark(model, Tissue::skin, skin);
+
     for (std::size_t i = 0; i < setup.positions.size(); ++i) {
         const PositionSetup& p = setup.positions[i];
-        RoutePerson person{p.id,  p.at, beam.diameter_at(p.at.value), static_cast<int>(i) == currentPosition,
-                           false, 0.0};
+        RoutePerson person{p.id, p.at, currentPosition == static_cast<int>(i), false, 0.0};
         if (assessment.covered()) {
             person.assessed = true;
-            person.ratio = assessment.positions[i].governing.ratio;
+            for (const CombinedRatio& r : assessment.positions[i].combined)
+                person.ratio = std::max(person.ratio, r.ratio);
         }
         model.people.push_back(person);
     }

@@ -14,7 +14,7 @@ struct RouteZone {
     dosimetry::Length to;
     bool startsBeforeAxis = false;
     bool endsBehindAxis = false;
-    std::string label;  ///< "eye: above the limit up to 298.2 m"
+    std::string label;  ///< "eye, 0.25 s: above the limit up to 298.2 m"
 };
 
 /// One line on a tissue where no zone can be drawn.
@@ -26,7 +26,6 @@ struct RouteRemark {
 struct RoutePerson {
     std::string id;
     dosimetry::Stated<dosimetry::Length> at;
-    dosimetry::Length beamDiameter;
     bool current = false;
     bool assessed = false;
     double ratio = 0.0;
@@ -44,9 +43,11 @@ struct RouteModel {
     std::vector<RoutePerson> people;
 
     using Axis = std::pair<dosimetry::Length, dosimetry::Length>;
-    /// The axis holds all positions and the hazard distances of the current one, unless it is given.
+    /// For the current position; without one, for the sheet, each tissue's zone is that of the exposure with
+    /// the largest hazard distance, so that nobody who is above a limit stands outside. The axis holds all
+    /// positions and the hazard distances of the current one, unless it is given.
     static RouteModel of(const dosimetry::Setup& setup, const dosimetry::Assessment& assessment,
-                         int currentPosition, const std::optional<Axis>& axis = std::nullopt);
+                         std::optional<int> currentPosition, const std::optional<Axis>& axis = std::nullopt);
 
     /// Place on the axis, 0 at `from` and 1 at `to`; not clipped.
     double fractionOf(dosimetry::Length distance) const;

@@ -5,6 +5,7 @@
 #include <QPalette>
 #include <algorithm>
 #include <cmath>
+#include <optional>
 #include <vector>
 
 #include "quantities/format.h"
@@ -37,20 +38,25 @@ void hatch(QPainter& painter, const QRectF& rect, const QColor& colour, bool ris
 void paintAxis(QPainter& painter, const RouteModel& model, const RouteLayout& layout,
                const RouteStyle& style) {
     const QFontMetricsF metrics(painter.font(), painter.device());
+    const double pen = metrics.height() / 14.0;  // a pixel on screen, no hairline on paper
     const int first = static_cast<int>(std::lround(std::log10(model.from.in_si())));
     const int last = static_cast<int>(std::lround(std::log10(model.to.in_si())));
     const double y = layout.plot.bottom();
-    painter.setPen(QPen(style.ink, 1.0));
+    painter.setPen(QPen(style.ink, pen));
     painter.drawLine(QPointF(layout.plot.left(), y), QPointF(layout.plot.right(), y));
+    double lastLabelEnd = -1e9;
     for (int decade = first; decade <= last; ++decade) {
         const double x = layout.xOf(metres(std::pow(10.0, decade)));
-        painter.setPen(QPen(style.faint, 1.0));
+        painter.setPen(QPen(style.faint, pen));
         painter.drawLine(QPointF(x, layout.plot.top()), QPointF(x, y));
-        painter.setPen(QPen(style.ink, 1.0));
+        painter.setPen(QPen(style.ink, pen));
         painter.drawLine(QPointF(x, y), QPointF(x, y + metrics.height() * 0.3));
         const QString label = text(decadeLabel(decade));
-        painter.drawText(QPointF(x - metrics.horizontalAdvance(label) / 2.0, y + metrics.height() * 1.15),
-                         label);
+        const double labelLeft = x - metrics.horizontalAdvance(label) / 2.0;
+        if (labelLeft > lastLabelEnd) {
+            painter.drawText(QPointF(labelLeft, y + metrics.height() * 1.15), label);
+            lastLabelEnd = labelLeft + metrics.horizontalAdvance(label) + metrics.averageCharWidth();
+        }
         if (decade == last) break;
         for (int k = 2; k < 10; ++k) {
             const double minor = layout.xOf(metres(k * std::pow(10.0, decade)));
@@ -62,6 +68,7 @@ void paintAxis(QPainter& painter, const RouteModel& model, const RouteLayout& la
 void paintZones(QPainter& painter, const RouteModel& model, const RouteLayout& layout,
                 const RouteStyle& style) {
     const QFontMetricsF metrics(painter.font(), painter.device());
+    const double pen = metrics.height() / 14.0;  // a pixel on screen, no hairline on paper
     for (Tissue tissue : {Tissue::eye, Tissue::skin}) {
         const bool eye = tissue == Tissue::eye;
         const double top = layout.bandTop(tissue);
@@ -73,11 +80,11 @@ void paintZones(QPainter& painter, const RouteModel& model, const RouteLayout& l
             const double right = zone.endsBehindAxis ? layout.plot.right() : layout.xOf(zone.to);
             const QRectF band(left, top, right - left, layout.bandHeight);
             hatch(painter, band, colour, eye, layout.bandHeight * 0.45);
-            painter.setPen(QPen(colour, 1.5));
+            painter.setPen(QPen(colour, pen * 1.5));
             painter.setBrush(Qt::NoBrush);
             painter.drawRect(band);
             // the end of the zone goes down to the axis, so that it can be read off
-            QPen down(colour, 1.2, Qt::DashLine);
+            QPen down(colour, pen * 1.2, Qt::DashLine);
             painter.setPen(down);
             if (!zone.endsBehindAxis)
                 painter.drawLine(QPointF(right, band.bottom()), QPointF(right, layout.plot.bottom()));
@@ -103,6 +110,7 @@ void paintZones(QPainter& painter, const RouteModel& model, const RouteLayout& l
 void paintBeam(QPainter& painter, const RouteModel& model, const RouteLayout& layout, const RouteStyle& style,
                double sourceLeft) {
     const QFontMetricsF metrics(painter.font(), painter.device());
+    const double pen = metrics.height() / 14.0;  // a pixel on screen, no hairline on paper
     double widest = 0.0;
     for (Length d : model.diameters) widest = std::max(widest, d.in_si());
     QPolygonF upper;
@@ -119,14 +127,14 @@ void paintBeam(QPainter& painter, const RouteModel& model, const RouteLayout& la
     painter.setBrush(fill);
     painter.drawPolygon(upper + lower);
     painter.setBrush(Qt::NoBrush);
-    painter.setPen(QPen(style.beam, 1.6));
+    painter.setPen(QPen(style.beam, pen * 1.6));
     painter.drawPolyline(upper);
     painter.drawPolyline(lower);
     const double boxHeight = metrics.height() * 1.6;
     const QRectF box(sourceLeft, layout.axisY - boxHeight / 2,
                      layout.plot.left() - sourceLeft - metrics.averageCharWidth(), boxHeight);
     painter.drawLine(QPointF(box.right(), layout.axisY), QPointF(layout.plot.left(), layout.axisY));
-    painter.setPen(QPen(style.ink, 1.2));
+    painter.setPen(QPen(style.ink, pen * 1.2));
     painter.setBrush(style.paper);
     painter.drawRect(box);
     painter.drawText(box, Qt::AlignCenter,
@@ -140,16 +148,28 @@ void paintBeam(QPainter& painter, const RouteModel& model, const RouteLayout& la
     painter.drawText(label, Qt::AlignCenter, wide);
 }
 
-void paintPerson(QPainter& painter, const RoutePerson& person, const RouteLayout& layout,
-                 const RouteStyle& style) {
+/// A warning triangle over the head of whoever is above a limit, so that it does not depend on the zones
+/// alone.
+void paintTriangle(QPainter& painter, const QPointF& top, double size, const RouteStyle& style) {
+    const QPolygonF triangle({top, top + QPointF(size * 0.58, size), top + QPointF(-size * 0.58, size)});
+    painter.setPen(QPen(style.ink, size * 0.09, Qt::SolidLine, Qt::RoundCap, Qt::RoundJoin));
+    painter.setBrush(style.warning);
+    painter.drawPolygon(triangle);
+    painter.drawLine(top + QPointF(0, size * 0.38), top + QPointF(0, size * 0.64));
+    painter.drawPoint(top + QPointF(0, size * 0.83));
+}
+
+void paintPerson(QPainter& painter, const RoutePerson& person, int number, bool numbered,
+                 const RouteLayout& layout, const RouteStyle& style) {
     const QFontMetricsF metrics(painter.font(), painter.device());
+    const double pen = metrics.height() / 14.0;
     const QRectF r = layout.personRect(person);
     const double x = r.center().x();
     const double head = r.height() * 0.13;
     const QColor colour = person.current ? style.highlight : style.ink;
-    painter.setPen(QPen(style.faint, 1.0, Qt::DashLine));
+    painter.setPen(QPen(style.faint, pen, Qt::DashLine));
     painter.drawLine(QPointF(x, r.bottom()), QPointF(x, layout.plot.bottom()));
-    painter.setPen(QPen(colour, person.current ? 2.4 : 1.6, Qt::SolidLine, Qt::RoundCap));
+    painter.setPen(QPen(colour, pen * (person.current ? 2.2 : 1.5), Qt::SolidLine, Qt::RoundCap));
     painter.setBrush(style.paper);
     // the eye is on the beam's axis
     painter.drawEllipse(QPointF(x, layout.axisY), head, head);
@@ -160,47 +180,57 @@ void paintPerson(QPainter& painter, const RoutePerson& person, const RouteLayout
     painter.drawLine(QPointF(x, neck + head * 0.6), QPointF(x + head * 1.2, neck + (hip - neck) * 0.8));
     painter.drawLine(QPointF(x, hip), QPointF(x - head * 0.9, r.bottom()));
     painter.drawLine(QPointF(x, hip), QPointF(x + head * 0.9, r.bottom()));
+    if (numbered) {
+        painter.setPen(style.ink);
+        const QRectF box(x - metrics.height(), layout.axisY - metrics.height() / 2, metrics.height() * 2,
+                         metrics.height());
+        painter.drawText(box, Qt::AlignCenter, QString::number(number));
+    }
+    if (person.assessed && person.ratio > 1.0)
+        paintTriangle(painter, QPointF(x, layout.axisY - head * 1.3 - metrics.height() * 0.95),
+                      metrics.height() * 0.9, style);
 }
 
-/// Beside the feet, on the other side or lower down, wherever no other label stands yet.
-void paintLabel(QPainter& painter, const RoutePerson& person, const RouteLayout& layout,
-                const RouteStyle& style, std::vector<QRectF>& taken) {
+/// Beside the feet, on the other side or lower down, wherever no other label or figure stands; a person whose
+/// label finds no room keeps only the number.
+void paintLabel(QPainter& painter, const RoutePerson& person, int number, bool numbered,
+                const RouteLayout& layout, const RouteStyle& style, std::vector<QRectF>& taken) {
     QFont bold = painter.font();
     bold.setBold(person.current);
     const QFontMetricsF metrics(painter.font(), painter.device());
     const QFontMetricsF boldMetrics(bold, painter.device());
-    const QString name = text(person.id);
+    const double gap = metrics.averageCharWidth();
+    const double widest = metrics.averageCharWidth() * 30;
+    const QString name = boldMetrics.elidedText(
+        (numbered ? QString::number(number) + ". " : QString()) + text(person.id), Qt::ElideRight, widest);
     QString value = text(person.at.text);
     if (person.assessed)
         value += QStringLiteral(": ") + text(format_number(person.ratio, 4, Rounding::up)) +
                  QStringLiteral(" × limit");
-    const double gap = metrics.averageCharWidth();
     const double width =
         std::max(boldMetrics.horizontalAdvance(name), metrics.horizontalAdvance(value)) + gap;
     const double height = metrics.height() * 2.0;
     const QRectF figure = layout.personRect(person);
     const double right = figure.center().x() + figure.width() * 0.6;
     const double left = figure.center().x() - figure.width() * 0.6 - width;
-    QRectF box;
-    for (int row = 0; row < 4; ++row) {
-        const double top = figure.bottom() - height + row * (height + metrics.height() * 0.2);
-        bool placed = false;
-        for (double x : {right, left}) {
-            if (x + width > layout.plot.right() || x < layout.plot.left()) continue;
-            box = QRectF(x, top, width, height);
-            placed =
-                std::none_of(taken.begin(), taken.end(), [&](const QRectF& r) { return r.intersects(box); });
-            if (placed) break;
-        }
-        if (placed) break;
-    }
-    if (box.isNull()) box = QRectF(layout.plot.left(), figure.bottom() - height, width, height);
-    taken.push_back(box);
+    const std::optional<QRectF> box = [&]() -> std::optional<QRectF> {
+        for (double top = figure.bottom() - height; top + height < layout.plot.bottom(); top += height * 1.1)
+            for (double x : {right, left}) {
+                const QRectF candidate(x, top, width, height);
+                if (x < layout.plot.left() || x + width > layout.plot.right()) continue;
+                if (std::none_of(taken.begin(), taken.end(),
+                                 [&](const QRectF& t) { return t.intersects(candidate); }))
+                    return candidate;
+            }
+        return std::nullopt;
+    }();
+    if (!box) return;
+    taken.push_back(*box);
     QColor back = style.paper;
     back.setAlphaF(0.85F);
-    painter.fillRect(box, back);
+    painter.fillRect(*box, back);
     painter.setPen(style.ink);
-    const QRectF inner = box.adjusted(gap / 2, 0, 0, 0);
+    const QRectF inner = box->adjusted(gap / 2, 0, 0, 0);
     painter.save();
     painter.setFont(bold);
     painter.drawText(inner.adjusted(0, 0, 0, -height / 2), Qt::AlignLeft | Qt::AlignVCenter, name);
@@ -211,13 +241,19 @@ void paintLabel(QPainter& painter, const RoutePerson& person, const RouteLayout&
 }  // namespace
 
 RouteStyle RouteStyle::forScreen(const QPalette& p) {
-    return {p.color(QPalette::Base), p.color(QPalette::Text), colours::faint(p),           colours::beam(p),
-            colours::eyeZone(p),     colours::skinZone(p),    p.color(QPalette::Highlight)};
+    return {p.color(QPalette::Base),
+            p.color(QPalette::Text),
+            colours::faint(p),
+            colours::beam(p),
+            colours::eyeZone(p),
+            colours::skinZone(p),
+            p.color(QPalette::Highlight),
+            colours::warning()};
 }
 
 RouteStyle RouteStyle::forPaper() {
-    return {Qt::white,          Qt::black, QColor(205, 205, 205), QColor(70, 70, 70), Qt::black,
-            QColor(90, 90, 90), Qt::black};
+    return {Qt::white, Qt::black, QColor(205, 205, 205), QColor(70, 70, 70), Qt::black, QColor(90, 90, 90),
+            Qt::black, Qt::white};
 }
 
 RouteLayout::RouteLayout(const RouteModel& model, const QRectF& area, double lineHeight)
@@ -256,13 +292,16 @@ void paintRoute(QPainter& painter, const QRectF& area, const RouteModel& model, 
     paintAxis(painter, model, layout, style);
     paintZones(painter, model, layout, style);
     paintBeam(painter, model, layout, style, area.left() + metrics.averageCharWidth());
-    // the current person last, so that it lies on top; its label first, so that it has the best place
-    std::vector<const RoutePerson*> people;
-    for (const RoutePerson& person : model.people) people.push_back(&person);
-    std::stable_partition(people.begin(), people.end(), [](const RoutePerson* p) { return p->current; });
+    // The current person lies on top and its label has the best place.
+    std::vector<std::size_t> order;
+    for (std::size_t i = 0; i < model.people.size(); ++i) order.push_back(i);
+    std::stable_partition(order.begin(), order.end(), [&](std::size_t i) { return model.people[i].current; });
+    const bool numbered = order.size() > 1;
     std::vector<QRectF> taken;
-    for (const RoutePerson* person : people) taken.push_back(layout.personRect(*person));
-    for (auto it = people.rbegin(); it != people.rend(); ++it) paintPerson(painter, **it, layout, style);
-    for (const RoutePerson* person : people) paintLabel(painter, *person, layout, style, taken);
+    for (const RoutePerson& person : model.people) taken.push_back(layout.personRect(person));
+    for (auto i = order.rbegin(); i != order.rend(); ++i)
+        paintPerson(painter, model.people[*i], static_cast<int>(*i) + 1, numbered, layout, style);
+    for (std::size_t i : order)
+        paintLabel(painter, model.people[i], static_cast<int>(i) + 1, numbered, layout, style, taken);
     painter.restore();
 }

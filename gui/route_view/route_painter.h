@@ -11,7 +11,7 @@ class QPalette;
 /// Colours of the drawing; for paper everything is black on white and only the hatching tells the zones
 /// apart.
 struct RouteStyle {
-    QColor paper, ink, faint, beam, eye, skin, highlight;
+    QColor paper, ink, faint, beam, eye, skin, highlight, warning;
     static RouteStyle forScreen(const QPalette& palette);
     static RouteStyle forPaper();
 };

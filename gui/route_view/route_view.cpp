@@ -1,5 +1,6 @@
 #include "route_view/route_view.h"
 
+#include <QApplication>
 #include <QMouseEvent>
 #include <QPainter>
 #include <algorithm>
@@ -34,6 +35,8 @@ void RouteView::rebuild() {
     model_ = RouteModel::of(session_.setup(), session_.assessment(), session_.currentPosition(), heldAxis_);
     QString description;
     for (const RouteZone& zone : model_.zones) description += QString::fromStdString(zone.label) + ". ";
+    for (const RouteRemark& remark : model_.remarks)
+        description += QString::fromStdString(remark.text) + ". ";
     if (session_.assessment().covered())
         description += QString::fromStdString(
             verdict(session_.assessment().positions[static_cast<std::size_t>(session_.currentPosition())]));
@@ -65,22 +68,32 @@ void RouteView::mousePressEvent(QMouseEvent* event) {
     const int person = personAt(event->position());
     if (event->button() != Qt::LeftButton || person < 0) return;
     session_.setCurrentPosition(person);
-    heldAxis_ = {model_.from, model_.to};
-    ++drags_;
-    setCursor(Qt::SizeHorCursor);
+    if (session_.currentPosition() != person) return;
+    const RouteLayout layout(model_, rect(), QFontMetricsF(font()).height());
+    pressed_ = true;
+    pressedAt_ = event->position();
+    grabOffset_ = layout.xOf(model_.people[static_cast<std::size_t>(person)].at.value) - pressedAt_.x();
 }
 
 void RouteView::mouseMoveEvent(QMouseEvent* event) {
-    if (!heldAxis_) {
+    if (!pressed_) {
         setCursor(personAt(event->position()) >= 0 ? Qt::SizeHorCursor : Qt::ArrowCursor);
         return;
     }
+    if (!heldAxis_) {  // a click alone moves nobody
+        if (std::fabs(event->position().x() - pressedAt_.x()) < QApplication::startDragDistance()) return;
+        heldAxis_ = {model_.from, model_.to};
+        ++drags_;
+        setCursor(Qt::SizeHorCursor);
+    }
     const RouteLayout layout(model_, rect(), QFontMetricsF(font()).height());
-    const double x = std::clamp(event->position().x(), layout.plot.left(), layout.plot.right());
+    const double x = std::clamp(event->position().x() + grabOffset_, layout.plot.left(), layout.plot.right());
     moveCurrentTo(layout.distanceAt(x), QString("drag%1").arg(drags_));
 }
 
-void RouteView::mouseReleaseEvent(QMouseEvent*) {
+void RouteView::mouseReleaseEvent(QMouseEvent* event) {
+    if (event->button() != Qt::LeftButton) return;
+    pressed_ = false;
     if (!heldAxis_) return;
     heldAxis_.reset();
     rebuild();

@@ -34,5 +34,8 @@ class RouteView : public QWidget {
     RouteModel model_;
     std::optional<RouteModel::Axis>
         heldAxis_;  ///< while dragging the axis must not run away from under the pointer
+    QPointF pressedAt_;
+    double grabOffset_ = 0.0;  ///< from the pointer to the person it took, in pixels
+    bool pressed_ = false;
     int drags_ = 0;
 };

@@ -6,8 +6,6 @@
 #include <QStandardPaths>
 #include <QUuid>
 
-#include "documents/setup_document.h"
-#include "limits/limit_library.h"
 #include "quantities/input_error.h"
 #include "session/files.h"
 #include "session/session.h"
@@ -54,30 +52,30 @@ void Recovery::update() {
     }
 }
 
-std::optional<Recovery::Leftover> Recovery::takeLeftover() {
+std::optional<Recovery::Leftover> Recovery::findLeftover() {
     for (const QFileInfo& info : QDir(folder_).entryInfoList({"*.toml"}, QDir::Files, QDir::Time)) {
-        const QString path = info.filePath();
-        const QString base = path.chopped(5);
+        const QString copy = info.filePath();
+        const QString base = copy.chopped(5);
         if (base == base_) continue;
         QLockFile lock(base + ".lock");
         lock.setStaleLockTime(0);
         if (!lock.tryLock(0)) continue;  // its program is still running
         try {
-            const QByteArray bytes = readSetupFile(path);
-            Leftover leftover;
-            leftover.setup = dosimetry::read_setup({bytes.data(), static_cast<std::size_t>(bytes.size())},
-                                                   path.toStdString(), dosimetry::LimitLibrary::embedded())
-                                 .setup;
+            const QByteArray bytes = readSetupFile(copy);
+            QString path;
             if (bytes.startsWith(pathMark))
-                leftover.path =
-                    QString::fromUtf8(bytes.mid(pathMark.size(), bytes.indexOf('\n') - pathMark.size()));
-            QFile::remove(path);
-            return leftover;
+                path = QString::fromUtf8(bytes.mid(pathMark.size(), bytes.indexOf('\n') - pathMark.size()));
+            return Leftover{setupFrom(bytes, copy), path, copy, info.lastModified()};
         } catch (const dosimetry::InputError&) {
-            QFile::rename(path, path + ".unreadable");
+            QFile::rename(copy, copy + ".unreadable");
+            unreadable_ += copy + ".unreadable";
         }
     }
     return std::nullopt;
+}
+
+void Recovery::discard(const Leftover& leftover) {
+    QFile::remove(leftover.copy);
 }
 
 QString Recovery::usualFolder() {

@@ -1,6 +1,8 @@
 #pragma once
 
+#include <QDateTime>
 #include <QObject>
+#include <QStringList>
 #include <QTimer>
 #include <memory>
 #include <optional>
@@ -23,10 +25,16 @@ class Recovery : public QObject {
     struct Leftover {
         dosimetry::Setup setup;
         QString path;  ///< the file it belongs to, empty if it had none
+        QString copy;
+        QDateTime time;
     };
-    /// Work that a program left behind which is no longer running; taken out of the folder. A copy that
-    /// cannot be read is renamed and stays.
-    std::optional<Leftover> takeLeftover();
+    /// Work that a program left behind which is no longer running, the newest first. It stays until it is
+    /// discarded.
+    std::optional<Leftover> findLeftover();
+    /// Removes the copy of work that was taken up again or given up.
+    void discard(const Leftover& leftover);
+    /// Copies that could not be read were renamed by `findLeftover` and stay; their names.
+    const QStringList& unreadable() const { return unreadable_; }
 
     /// Writes or removes the copy now instead of within a second.
     void update();
@@ -38,6 +46,7 @@ class Recovery : public QObject {
     Session& session_;
     QString folder_;
     QString base_;
+    QStringList unreadable_;
     std::unique_ptr<QLockFile> lock_;
     QTimer timer_;
 };

@@ -33,6 +33,8 @@ class Session : public QObject {
     void setInvalidField(const QString& key, const QString& reason);
     void clearInvalidField(const QString& key);
     bool hasInvalidField() const { return !invalidFields_.isEmpty(); }
+    /// While a field of the current position is not valid, another position cannot be chosen.
+    bool hasInvalidPositionField() const;
     QString firstInvalidField() const {
         return invalidFields_.isEmpty() ? QString() : invalidFields_.firstKey();
     }
@@ -42,6 +44,8 @@ class Session : public QObject {
     void startNew();
     /// Opens a file. Throws InputError and keeps the present setup if that fails.
     void open(const QString& path);
+    /// Shows a setup that was read from `path`, with a new undo history.
+    void adopt(const dosimetry::Setup& setup, const QString& path);
     /// Takes over recovered work: unsaved changes that belong to `path`.
     void recover(const dosimetry::Setup& setup, const QString& path);
     /// Writes the file in one piece (QSaveFile). Throws InputError if that fails; the old file is then
@@ -50,7 +54,7 @@ class Session : public QObject {
     QString path() const { return path_; }
     bool isModified() const { return !undoStack_.isClean() || hasInvalidField(); }
 
-    /// The assessment file as it would be saved now, and its digest.
+    /// The assessment file as it would be saved now.
     QByteArray fileBytes() const;
 
   signals:
@@ -61,8 +65,7 @@ class Session : public QObject {
 
   private:
     friend class SetupCommand;
-    void show(const dosimetry::Setup& setup);
-    void replace(const dosimetry::Setup& setup, const QString& path);
+    void show(const dosimetry::Setup& setup, int position);
 
     dosimetry::Setup setup_;
     std::unique_ptr<const dosimetry::Assessment> assessment_;

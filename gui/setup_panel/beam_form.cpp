@@ -9,6 +9,7 @@
 #include "fields/choice_field.h"
 #include "fields/setup_field.h"
 #include "quantities/format.h"
+#include "quantities/input_error.h"
 #include "session/session.h"
 
 using namespace dosimetry;
@@ -38,25 +39,30 @@ int indexOf(const std::array<ChoiceName<Enum>, N>& names, Enum value) {
 }
 
 template <class Q>
-FieldBinding beamBinding(const QString& key, const QString& what,
-                         std::optional<Stated<Q>> BeamSetup::*member) {
-    return {key, what,
+FieldBinding beamBinding(const QString& key, const QString& what, std::optional<Stated<Q>> BeamSetup::*member,
+                         const QString& hint) {
+    return {key,
+            what,
             [member](const Setup& s) {
                 const auto& value = source(s).beam.*member;
                 return value ? value->text : std::string();
             },
-            [member](Setup& s, const std::string& text) { source(s).beam.*member = Stated<Q>(text); }};
+            [member](Setup& s, const std::string& text) { source(s).beam.*member = Stated<Q>(text); },
+            FieldBinding::Content::quantity,
+            hint};
 }
 
 FieldBinding m2Binding() {
-    return {"beam.m2", BeamForm::tr("beam propagation ratio M²"),
-            [](const Setup& s) {
-                const auto& m2 = source(s).beam.m2;
-                return m2 ? shortest(*m2) : std::string();
-            },
-            [](Setup& s, const std::string& text) {
-                source(s).beam.m2 = parse_number(text, DecimalMark::point);
-            }};
+    return {
+        "beam.m2",
+        BeamForm::tr("beam propagation ratio M²"),
+        [](const Setup& s) {
+            const auto& m2 = source(s).beam.m2;
+            return m2 ? shortest(*m2) : std::string();
+        },
+        [](Setup& s, const std::string& text) { source(s).beam.m2 = parse_number(text, DecimalMark::point); },
+        FieldBinding::Content::quantity,
+        BeamForm::tr("1 for a perfect Gaussian beam")};
 }
 
 FieldBinding apparentSourceBinding() {
@@ -71,7 +77,10 @@ FieldBinding apparentSourceBinding() {
                     source(s).apparent_source.reset();
                 else
                     source(s).apparent_source = Stated<Length>(text);
-            }};
+            },
+            FieldBinding::Content::quantity,
+            BeamForm::tr("Leave empty unless the size of the apparent source is known: a small source is the "
+                         "stricter case")};
 }
 
 /// Six digits are enough to repeat a statement and short enough to read.
@@ -100,9 +109,11 @@ BeamSetup restated(const LaserSetup& laser, Spread spread) {
     next.profile = laser.beam.profile;
     next.measured_at = laser.beam.measured_at;
     const auto divergence = restatedAs(beam.divergence() / scale, "mrad", 1e-3);
-    const double m2 =
-        std::max(1.0, beam.divergence() / divergence_from_m2(1.0, laser.wavelength.value, beam.waist()));
-    const double rounded_m2 = std::max(1.0, std::round(m2 * 1e4) / 1e4);
+    const double exact_m2 = beam.divergence() / divergence_from_m2(1.0, laser.wavelength.value, beam.waist());
+    const double m2 = std::round(exact_m2 * 1e4) / 1e4;
+    if ((spread == Spread::m2 || spread == Spread::waistAndM2) && m2 < 1.0)
+        throw InputError("the beam spreads less than diffraction allows, its M² would be " + shortest(m2),
+                         "a larger divergence or waist first");
     const Length exit_diameter = beam.diameter_at(metres(0)) / scale;
     switch (spread) {
         case Spread::divergence:
@@ -111,7 +122,7 @@ BeamSetup restated(const LaserSetup& laser, Spread spread) {
             if (spread == Spread::divergence)
                 next.divergence = divergence;
             else
-                next.m2 = rounded_m2;
+                next.m2 = m2;
             return next;
         case Spread::exitAndWaist: {
             next.diameter = laser.beam.diameter ? *laser.beam.diameter : mm(exit_diameter);
@@ -137,7 +148,7 @@ BeamSetup restated(const LaserSetup& laser, Spread spread) {
     if (spread == Spread::waistAndDivergence)
         next.divergence = divergence;
     else
-        next.m2 = rounded_m2;
+        next.m2 = m2;
     return next;
 }
 
@@ -147,11 +158,13 @@ BeamForm::BeamForm(Session& session, QWidget* parent)
     form_->addRow(
         tr("Profile"),
         new ChoiceField(session, shownNames(profile_names),
-                        {"beam.profile", tr("beam profile"),
+                        {"beam.profile",
+                         tr("beam profile"),
                          [](const Setup& s) { return indexOf(profile_names, source(s).beam.profile); },
                          [](Setup& s, int i) {
                              source(s).beam.profile = profile_names[static_cast<std::size_t>(i)].value;
-                         }}));
+                         },
+                         {}}));
     form_->addRow(
         tr("Widths measured at"),
         new ChoiceField(session, shownNames(width_names),
@@ -159,25 +172,33 @@ BeamForm::BeamForm(Session& session, QWidget* parent)
                          [](const Setup& s) { return indexOf(width_names, source(s).beam.measured_at); },
                          [](Setup& s, int i) {
                              source(s).beam.measured_at = width_names[static_cast<std::size_t>(i)].value;
-                         }}));
+                         },
+                         tr("Holds for diameter, waist and divergence alike")}));
     const QStringList spreads{tr("divergence, waist at the exit"), tr("M², waist at the exit"),
                               tr("diameter at the exit and a waist"), tr("waist and divergence"),
                               tr("waist and M²")};
     form_->addRow(tr("Spread given by"),
-                  new ChoiceField(session, spreads,
-                                  {"beam.spread", tr("how the spread is stated"),
-                                   [](const Setup& s) { return static_cast<int>(spreadOf(source(s).beam)); },
-                                   [](Setup& s, int i) {
-                                       source(s).beam = restated(source(s), static_cast<Spread>(i));
-                                   }}));
-    diameter_ = new SetupField(
-        session, beamBinding("beam.diameter", tr("beam diameter at the exit"), &BeamSetup::diameter));
+                  new ChoiceField(
+                      session, spreads,
+                      {"beam.spread", tr("how the spread is stated"),
+                       [](const Setup& s) { return static_cast<int>(spreadOf(source(s).beam)); },
+                       [](Setup& s, int i) { source(s).beam = restated(source(s), static_cast<Spread>(i)); },
+                       tr("What the data sheet states; changing it restates the same beam")}));
+    const QString asChosen = tr("Measured as chosen at “Widths measured at”; data sheets often mean 1/e²");
+    diameter_ = new SetupField(session, beamBinding("beam.diameter", tr("beam diameter at the exit"),
+                                                    &BeamSetup::diameter, asChosen));
     divergence_ = new SetupField(
-        session, beamBinding("beam.divergence", tr("full-angle divergence"), &BeamSetup::divergence));
+        session,
+        beamBinding(
+            "beam.divergence", tr("full-angle divergence"), &BeamSetup::divergence,
+            tr("The full angle, twice the half angle that some data sheets give; measured as chosen at "
+               "“Widths measured at”")));
     m2_ = new SetupField(session, m2Binding());
-    waist_ = new SetupField(session, beamBinding("beam.waist", tr("waist diameter"), &BeamSetup::waist));
-    waistAt_ = new SetupField(session, beamBinding("beam.waist_at", tr("distance of the waist from the exit"),
-                                                   &BeamSetup::waist_at));
+    waist_ =
+        new SetupField(session, beamBinding("beam.waist", tr("waist diameter"), &BeamSetup::waist, asChosen));
+    waistAt_ = new SetupField(
+        session, beamBinding("beam.waist_at", tr("distance of the waist from the exit"), &BeamSetup::waist_at,
+                             tr("Negative if the waist lies inside the laser")));
     form_->addRow(tr("Diameter at exit"), diameter_);
     form_->addRow(tr("Divergence, full angle"), divergence_);
     form_->addRow(tr("M²"), m2_);
@@ -192,9 +213,13 @@ BeamForm::BeamForm(Session& session, QWidget* parent)
 
 void BeamForm::showRows() {
     const BeamSetup& beam = source(session_.setup()).beam;
-    form_->setRowVisible(diameter_, beam.diameter.has_value());
-    form_->setRowVisible(divergence_, beam.divergence.has_value());
-    form_->setRowVisible(m2_, beam.m2.has_value());
-    form_->setRowVisible(waist_, beam.waist.has_value());
-    form_->setRowVisible(waistAt_, beam.waist_at.has_value());
+    const auto show = [this](SetupField* field, bool shown) {
+        form_->setRowVisible(field, shown);
+        if (!shown) field->reload();  // nothing invalid may stay where nobody sees it
+    };
+    show(diameter_, beam.diameter.has_value());
+    show(divergence_, beam.divergence.has_value());
+    show(m2_, beam.m2.has_value());
+    show(waist_, beam.waist.has_value());
+    show(waistAt_, beam.waist_at.has_value());
 }

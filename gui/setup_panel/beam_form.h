@@ -6,6 +6,7 @@
 
 class QFormLayout;
 class Session;
+class SetupField;
 
 /// The ways to state how a beam spreads.
 enum class Spread { divergence, m2, exitAndWaist, waistAndDivergence, waistAndM2 };
@@ -28,9 +29,9 @@ class BeamForm : public QGroupBox {
     void showRows();
     Session& session_;
     QFormLayout* form_;
-    QWidget* diameter_;
-    QWidget* divergence_;
-    QWidget* m2_;
-    QWidget* waist_;
-    QWidget* waistAt_;
+    SetupField* diameter_;
+    SetupField* divergence_;
+    SetupField* m2_;
+    SetupField* waist_;
+    SetupField* waistAt_;
 };

@@ -2,7 +2,7 @@
 
 #include <QGroupBox>
 
-class QComboBox;
+class CalmComboBox;
 class QPushButton;
 class Session;
 
@@ -15,10 +15,12 @@ class PositionForm : public QGroupBox {
 
   private:
     void showPositions();
+    void showValidity();
     void addCopy();
     void removeCurrent();
 
     Session& session_;
-    QComboBox* chosen_;
+    CalmComboBox* chosen_;
+    QPushButton* add_;
     QPushButton* remove_;
 };

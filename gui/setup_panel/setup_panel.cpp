@@ -19,8 +19,12 @@ namespace {
 
 /// A free text of the heading.
 FieldBinding textBinding(const QString& key, const QString& what, std::string Setup::*member) {
-    return {key, what, [member](const Setup& s) { return s.*member; },
-            [member](Setup& s, const std::string& text) { s.*member = text; }};
+    return {key,
+            what,
+            [member](const Setup& s) { return s.*member; },
+            [member](Setup& s, const std::string& text) { s.*member = text; },
+            FieldBinding::Content::text,
+            {}};
 }
 
 QGroupBox* headingGroup(Session& session) {
@@ -44,25 +48,32 @@ QGroupBox* sourceGroup(Session& session) {
     auto* form = new QFormLayout(group);
     form->setFieldGrowthPolicy(QFormLayout::AllNonFixedFieldsGrow);
     form->addRow(SetupPanel::tr("Name"),
-                 new SetupField(session, {"source.id", SetupPanel::tr("name of the source"),
+                 new SetupField(session, {"source.id",
+                                          SetupPanel::tr("name of the source"),
                                           [](const Setup& s) { return s.sources.front().id; },
                                           [](Setup& s, const std::string& text) {
                                               s.sources.front().id = nonEmpty(text);
-                                          }}));
+                                          },
+                                          FieldBinding::Content::text,
+                                          {}}));
     form->addRow(SetupPanel::tr("Wavelength"),
                  new SetupField(session, {"source.wavelength", SetupPanel::tr("wavelength"),
                                           [](const Setup& s) { return s.sources.front().wavelength.text; },
                                           [](Setup& s, const std::string& text) {
                                               s.sources.front().wavelength =
                                                   dosimetry::Stated<dosimetry::Length>(text);
-                                          }}));
+                                          },
+                                          FieldBinding::Content::quantity,
+                                          SetupPanel::tr("With a unit, such as 532 nm or 10.6 um")}));
     form->addRow(SetupPanel::tr("Power"),
-                 new SetupField(session, {"source.power", SetupPanel::tr("power"),
-                                          [](const Setup& s) { return s.sources.front().power.text; },
-                                          [](Setup& s, const std::string& text) {
-                                              s.sources.front().power =
-                                                  dosimetry::Stated<dosimetry::RadiantPower>(text);
-                                          }}));
+                 new SetupField(
+                     session, {"source.power", SetupPanel::tr("power"),
+                               [](const Setup& s) { return s.sources.front().power.text; },
+                               [](Setup& s, const std::string& text) {
+                                   s.sources.front().power = dosimetry::Stated<dosimetry::RadiantPower>(text);
+                               },
+                               FieldBinding::Content::quantity,
+                               SetupPanel::tr("The largest power that can leave the exit, such as 5 mW")}));
     return group;
 }
 
@@ -71,10 +82,10 @@ QGroupBox* sourceGroup(Session& session) {
 SetupPanel::SetupPanel(Session& session, QWidget* parent) : QScrollArea(parent) {
     auto* content = new QWidget;
     auto* layout = new QVBoxLayout(content);
+    layout->addWidget(headingGroup(session));
     layout->addWidget(sourceGroup(session));
     layout->addWidget(new BeamForm(session));
     layout->addWidget(new PositionForm(session));
-    layout->addWidget(headingGroup(session));
     layout->addStretch();
     setWidget(content);
     setWidgetResizable(true);

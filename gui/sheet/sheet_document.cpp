@@ -28,9 +28,23 @@ QString styleSheet() {
         "table.grid td, table.grid th { border: 0.5px solid #606060; }");
 }
 
-/// True if the frame starts on one page and ends on another, although it would fit on one.
+/// The frame together with the tables that follow it directly: the margins of a position and its other
+/// values.
+QRectF groupRect(const QTextDocument& document, QTextFrame* first) {
+    QRectF rect = document.documentLayout()->frameBoundingRect(first);
+    const QList<QTextFrame*> frames = document.rootFrame()->childFrames();
+    for (qsizetype i = frames.indexOf(first) + 1; i < frames.size(); ++i) {
+        const bool directly = document.findBlock(frames[i]->firstPosition() - 1).text().isEmpty() &&
+                              frames[i]->firstPosition() - frames[i - 1]->lastPosition() <= 3;
+        if (!directly || first->frameFormat().border() == 0.0) break;
+        rect |= document.documentLayout()->frameBoundingRect(frames[i]);
+    }
+    return rect;
+}
+
+/// True if the group starts on one page and ends on another, although it would fit on one.
 bool isTorn(const QTextDocument& document, QTextFrame* frame) {
-    const QRectF rect = document.documentLayout()->frameBoundingRect(frame);
+    const QRectF rect = groupRect(document, frame);
     const double height = document.pageSize().height();
     return rect.height() < height &&
            std::floor(rect.top() / height) != std::floor((rect.bottom() - 1.0) / height);
@@ -88,7 +102,8 @@ void keepTogether(QTextDocument& document) {
 
 QSizeF RouteObject::intrinsicSize(QTextDocument* document, int, const QTextFormat&) {
     const double width = document->pageSize().width() - 2.0 * document->documentMargin();
-    return {width, width * 0.36};
+    const double people = static_cast<double>(model_.people.size());
+    return {width, width * std::min(0.36 + 0.03 * std::max(0.0, people - 2.0), 0.7)};
 }
 
 void RouteObject::drawObject(QPainter* painter, const QRectF& rect, QTextDocument* document, int,
@@ -109,7 +124,7 @@ void fillSheetDocument(QTextDocument& document, const dosimetry::Setup& setup,
     document.setDefaultFont(font);
     document.documentLayout()->setPaintDevice(&device);
     document.documentLayout()->registerHandler(
-        RouteObject::type, new RouteObject(RouteModel::of(setup, assessment, 0), &document));
+        RouteObject::type, new RouteObject(RouteModel::of(setup, assessment, std::nullopt), &document));
     document.setDocumentMargin(0);
     document.setDefaultStyleSheet(styleSheet());
     document.setHtml(sheetHtml(setup, assessment, fileSha256));

@@ -21,13 +21,6 @@ QString escaped(std::string_view text) {
     return escaped(std::string(text));
 }
 
-QString up(const LimitValue& value) {
-    return escaped(std::visit([](auto q) { return format(q, 4, Rounding::up); }, value));
-}
-QString down(const LimitValue& value) {
-    return escaped(std::visit([](auto q) { return format(q, 4, Rounding::down); }, value));
-}
-
 QString head(const QString& text) {
     return "<h2>" + text + "</h2>";
 }
@@ -36,8 +29,7 @@ QString head(const QString& text) {
 class Facts {
   public:
     void add(const QString& label, const QString& value) {
-        if (!value.isEmpty())
-            rows_ += "<tr><td class='label' width='32%'>" + label + "</td><td>" + value + "</td></tr>";
+        if (!value.isEmpty()) rows_ += "<tr><td width='32%'>" + label + "</td><td>" + value + "</td></tr>";
     }
     QString html() const {
         return "<table width='100%' class='facts' cellpadding='3' cellspacing='0'>" + rows_ + "</table>";
@@ -47,21 +39,48 @@ class Facts {
     QString rows_;
 };
 
+/// What a person should have stated and did not, to be written by hand.
+QString orBlank(const std::string& text) {
+    return text.empty() ? tr("not stated") : escaped(text);
+}
+
+QString titleOf(const Setup& setup) {
+    return setup.title.empty() ? tr("Laser assessment") : escaped(setup.title);
+}
+
 QString identification(const Setup& setup) {
     Facts facts;
-    facts.add(tr("Place"), escaped(setup.place));
-    facts.add(tr("Assessed by"), escaped(setup.assessor));
-    facts.add(tr("Date"), escaped(setup.date));
-    facts.add(tr("Note"), escaped(setup.note));
-    return "<h1>" + (setup.title.empty() ? tr("Laser assessment") : escaped(setup.title)) + "</h1>" +
-           facts.html();
+    facts.add(tr("Place"), orBlank(setup.place));
+    facts.add(tr("Assessed by"), orBlank(setup.assessor));
+    facts.add(tr("Date"), orBlank(setup.date));
+    facts.add(tr("Note"), escaped(setup.note).replace('\n', "<br/>"));
+    return "<h1>" + titleOf(setup) + "</h1>" + facts.html();
+}
+
+/// One line for all positions, which the signature page repeats.
+QString overall(const Assessment& assessment) {
+    int above = 0;
+    for (const PositionAssessment& p : assessment.positions)
+        if (!p.within_limits()) ++above;
+    const auto all = static_cast<int>(assessment.positions.size());
+    if (above == 0) return tr("Within the exposure limits at every position assessed (%1).").arg(all);
+    return tr("ABOVE THE EXPOSURE LIMITS at %1 of %2 positions.").arg(above).arg(all);
+}
+
+/// "2. “door”", as in the drawing.
+QString numbered(const Assessment& assessment, const PositionAssessment& p) {
+    const auto number = &p - assessment.positions.data() + 1;
+    const QString name = "“" + escaped(p.id) + "”";
+    return assessment.positions.size() > 1 ? QString::number(number) + ". " + name : name;
 }
 
 QString verdicts(const Assessment& assessment) {
-    QString html;
-    for (const PositionAssessment& p : assessment.positions)
-        html += "<p class='verdict'>" + tr("Position") + " “" + escaped(p.id) + "”: " + escaped(verdict(p)) +
-                "</p>";
+    QString html = "<p class='verdict'>" + overall(assessment) + "</p>";
+    for (const PositionAssessment& p : assessment.positions) {
+        const QString sign = p.within_limits() ? QString() : QStringLiteral("⚠ ");
+        html += "<p>" + sign + "<b>" + tr("Position") + " " + numbered(assessment, p) + ":</b> " +
+                escaped(verdict(p)) + "</p>";
+    }
     return html;
 }
 
@@ -100,8 +119,8 @@ QString limitsPart(const Assessment& assessment) {
     return facts.html();
 }
 
-QString marginsPart(const PositionAssessment& p) {
-    QString html = "<h3>" + tr("Position") + " “" + escaped(p.id) + "”: " + escaped(p.at.text) + " " +
+QString marginsPart(const Assessment& assessment, const PositionAssessment& p) {
+    QString html = "<h3>" + tr("Position") + " " + numbered(assessment, p) + ": " + escaped(p.at.text) + " " +
                    tr("from the exit") + ", " + tr("exposure") + " " + escaped(p.exposure.text) + "</h3>";
     html += "<table width='100%' class='grid' cellpadding='4' cellspacing='0'><thead><tr><th align='left'>" +
             tr("Tissue, effect") + "</th><th align='right'>" + tr("Exposure") + "</th><th align='right'>" +
@@ -119,7 +138,7 @@ QString marginsPart(const PositionAssessment& p) {
         html += "<tr>" +
                 cell("left", escaped(name_of(c.tissue, c.effect)) +
                                  (governs ? " (" + tr("governs") + ")" : QString())) +
-                cell("right", up(c.exposure)) + cell("right", down(c.limit)) +
+                cell("right", escaped(exposure_text(c))) + cell("right", escaped(limit_text(c))) +
                 cell("right", escaped(format_number(c.ratio, 4, Rounding::up))) +
                 cell("right", escaped(format_number(c.margin(), 3, Rounding::down))) +
                 cell("right", "⌀ " + escaped(format(c.aperture, 3, Rounding::nearest))) +
@@ -130,14 +149,13 @@ QString marginsPart(const PositionAssessment& p) {
     facts.add(tr("Beam diameter there"), escaped(format(p.beam_diameter, 4, Rounding::nearest)));
     facts.add(tr("Irradiance on the axis"), escaped(format(p.peak_irradiance, 4, Rounding::up)));
     facts.add(tr("Photons per area, on the axis"), escaped(format(p.photons_per_area, 4, Rounding::up)));
-    facts.add(tr("Longest permitted exposure"), escaped(permitted_exposure_text(p)));
-    facts.add(tr("Highest permitted power"), escaped(format(p.permitted_power, 4, Rounding::down)));
+    facts.add(tr("Longest permitted exposure"), escaped(permitted_exposure_text(p) + tissue_remark(p)));
+    facts.add(tr("Highest permitted power"),
+              escaped(format(p.permitted_power, 4, Rounding::down) + tissue_remark(p)));
     if (p.required_density_eye)
-        facts.add(tr("Optical density needed, eye"),
-                  escaped(format_number(*p.required_density_eye, 3, Rounding::up)));
+        facts.add(tr("Optical density needed, eye"), escaped(density_text(*p.required_density_eye)));
     if (p.required_density_skin)
-        facts.add(tr("Optical density needed, skin"),
-                  escaped(format_number(*p.required_density_skin, 3, Rounding::up)));
+        facts.add(tr("Optical density needed, skin"), escaped(density_text(*p.required_density_skin)));
     return html + facts.html();
 }
 
@@ -157,7 +175,6 @@ QString list(const std::vector<std::string>& texts) {
 }
 
 QString signatures() {
-    const QString line = QString(QChar(0x00A0)).repeated(34);
     QString html =
         "<table width='100%' class='grid' cellpadding='7' cellspacing='0'><thead><tr><th align='left' "
         "width='34%'>" +
@@ -207,16 +224,17 @@ QString sheetHtml(const Setup& setup, const Assessment& assessment, const QStrin
     html += "<p>" + QString::fromUtf16(routePlaceholder) + "</p>";
     html += head(tr("Exposure limits used")) + limitsPart(assessment);
     html += head(tr("Margins"));
-    for (const PositionAssessment& position : assessment.positions) html += marginsPart(position);
+    for (const PositionAssessment& position : assessment.positions) html += marginsPart(assessment, position);
     html += head(tr("Hazard distances along the direct beam, unaided")) + distancesPart(assessment);
     html += head(tr("Assumptions")) + list(assessment.assumptions);
     html += head(tr("Cautions")) + list(assessment.cautions);
-    html += head(tr("Signatures")) + signatures();
+    html += head(tr("Signatures")) + "<p>" + titleOf(setup) + "<br/><b>" + overall(assessment) + "</b></p>" +
+            signatures();
     html += "<div style='page-break-before:always'>" + head(tr("Appendix: how each number came about")) +
             "<p>" +
             tr("Values are in SI units with nine significant digits, so that each step can be repeated by "
                "hand. The assessment "
-               "file is attached to the PDF; its SHA-256 is") +
+               "file that belongs to this sheet is attached to its PDF. SHA-256 of the attached file:") +
             " " + fileSha256 + ".</p></div>" + trails(assessment);
     return html;
 }

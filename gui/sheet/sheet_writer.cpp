@@ -19,13 +19,15 @@ namespace {
 constexpr double marginMm = 16.0;
 constexpr int dotsPerInch = 600;
 
-/// The short line that keeps pages of different sheets apart.
-QString footer(const Setup& setup, const QString& sha256, int page, int pages) {
-    return QObject::tr("%1 · %2 · assessment file SHA-256 %3… · page %4 of %5")
-        .arg(QString::fromStdString(setup.title.empty() ? std::string("Laser assessment") : setup.title),
-             QString::fromStdString(program_name()), sha256.left(16))
-        .arg(page)
-        .arg(pages);
+/// Which sheet and page this is; keeps pages of different sheets apart.
+QString footer(const Assessment& assessment, const QString& sha256, int page, int pages) {
+    QStringList editions;
+    for (const LimitSet* set : assessment.limit_sets)
+        editions += QString::fromStdString(set->edition().id + " (table " +
+                                           set->edition().sha256.substr(0, 8) + "…)");
+    return QString::fromStdString(program_name()) + " · " + editions.join(", ") + " · " +
+           QObject::tr("assessment file") + " " + sha256.left(16) + "… · " +
+           QObject::tr("page %1 of %2").arg(page).arg(pages);
 }
 
 }  // namespace
@@ -43,7 +45,7 @@ void paintSheet(QPagedPaintDevice& device, const Setup& setup, const Assessment&
     small.setPointSizeF(7.0);
     const QFontMetricsF metrics(small, &device);
     const QRectF paintArea(0, 0, device.width(), device.height());
-    const double footerHeight = metrics.height() * 2.4 + 4 * dots;
+    const double footerHeight = metrics.height() * 3.4 + 4 * dots;
     const QSizeF page(paintArea.width(), paintArea.height() - footerHeight);
 
     const QString sha256 =
@@ -66,13 +68,17 @@ void paintSheet(QPagedPaintDevice& device, const Setup& setup, const Assessment&
         painter.setPen(QPen(Qt::black, 0.5 * dots));
         const double top = page.height() + 3 * dots;
         painter.drawLine(QPointF(0, top), QPointF(page.width(), top));
-        painter.drawText(
-            QRectF(0, top + 2 * dots, page.width(), metrics.height()), Qt::AlignLeft,
-            metrics.elidedText(footer(setup, sha256, i + 1, pages), Qt::ElideMiddle, page.width()));
-        painter.drawText(
-            QRectF(0, top + 2 * dots + metrics.height(), page.width(), metrics.height()), Qt::AlignLeft,
-            QObject::tr(
-                "Supports a competent person, does not replace one. The appointed safety officer decides."));
+        const auto line = [&](int row, const QString& text) {
+            painter.drawText(
+                QRectF(0, top + 2 * dots + row * metrics.height(), page.width(), metrics.height()),
+                Qt::AlignLeft, metrics.elidedText(text, Qt::ElideMiddle, page.width()));
+        };
+        line(0, QString::fromStdString((setup.title.empty() ? std::string() : setup.title + " · ") +
+                                       setup.date));
+        line(1, footer(assessment, sha256, i + 1, pages));
+        line(2,
+             QObject::tr(
+                 "Supports a competent person, does not replace one. The appointed safety officer decides."));
     }
 }
 

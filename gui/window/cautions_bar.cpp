@@ -32,13 +32,7 @@ CautionsBar::CautionsBar(Session& session, QWidget* parent)
 
 void CautionsBar::showCautions() {
     QString html = "<b>" + tr("Cautions") + "</b> ";
-    // what this set-up calls for stands first: it is news, the general cautions are known after a while
-    const auto& cautions = session_.assessment().cautions;
-    constexpr std::size_t general = 4;
-    const auto add = [&](std::size_t i) {
-        html += "&nbsp;• " + QString::fromStdString(cautions[i]).toHtmlEscaped() + " ";
-    };
-    for (std::size_t i = general; i < cautions.size(); ++i) add(i);
-    for (std::size_t i = 0; i < general; ++i) add(i);
+    for (const std::string& caution : session_.assessment().cautions)
+        html += "&nbsp;• " + QString::fromStdString(caution).toHtmlEscaped() + " ";
     text_->setText(html);
 }

@@ -5,11 +5,13 @@
 #include <QCloseEvent>
 #include <QFileDialog>
 #include <QFileInfo>
+#include <QLocale>
 #include <QMenuBar>
 #include <QMessageBox>
 #include <QMimeData>
 #include <QPrintPreviewDialog>
 #include <QPrinter>
+#include <QPushButton>
 #include <QScreen>
 #include <QSplitter>
 #include <QStatusBar>
@@ -21,7 +23,9 @@
 #include "margins_view/margins_view.h"
 #include "quantities/input_error.h"
 #include "route_view/route_view.h"
+#include "session/files.h"
 #include "session/preferences.h"
+#include "session/recovery.h"
 #include "session/session.h"
 #include "setup_panel/setup_panel.h"
 #include "sheet/sheet_writer.h"
@@ -88,7 +92,7 @@ MainWindow::MainWindow(Session& session, QWidget* parent)
     makeActions();
     showTitle();
     showChart();
-    emit session_.currentPositionChanged();  // the margins view announces its first trail
+    margins_->announceTrail();
 
     const QSize usual(1320, 860);
     resize(screen() ? usual.boundedTo(screen()->availableSize() * 0.96) : usual);
@@ -112,7 +116,6 @@ void MainWindow::makeActions() {
         if (mayReplace()) session_.startNew();
     });
     add(file, tr("&Open …"), QKeySequence::Open, [this] {
-        if (!mayReplace()) return;
         const QString path =
             QFileDialog::getOpenFileName(this, tr("Open an assessment"), {}, assessmentFilter());
         if (!path.isEmpty()) openFile(path);
@@ -121,7 +124,7 @@ void MainWindow::makeActions() {
     connect(recent_, &QMenu::aboutToShow, this, &MainWindow::showRecentFiles);
     file->addSeparator();
     add(file, tr("&Save"), QKeySequence::Save, [this] { save(); });
-    add(file, tr("Save &as …"), QKeySequence::SaveAs, [this] { saveAs(); });
+    add(file, tr("Save &as …"), QKeySequence(Qt::CTRL | Qt::SHIFT | Qt::Key_S), [this] { saveAs(); });
     file->addSeparator();
     add(file, tr("Sheet as &PDF …"), QKeySequence(Qt::CTRL | Qt::Key_E), [this] { exportSheet(); });
     add(file, tr("Prin&t the sheet …"), QKeySequence::Print, [this] { printSheet(); });
@@ -169,27 +172,46 @@ void MainWindow::showChart() {
 void MainWindow::showRecentFiles() {
     recent_->clear();
     for (const QString& path : preferences::recentFiles())
-        connect(recent_->addAction(path), &QAction::triggered, this, [this, path] {
-            if (mayReplace()) openFile(path);
-        });
+        connect(recent_->addAction(QString(path).replace("&", "&&")), &QAction::triggered, this,
+                [this, path] { openFile(path); });
     if (recent_->isEmpty()) recent_->addAction(tr("none yet"))->setEnabled(false);
 }
 
 void MainWindow::openFile(const QString& path) {
+    const QString full = QFileInfo(path).absoluteFilePath();
     try {
-        session_.open(QFileInfo(path).absoluteFilePath());
-        preferences::addRecentFile(session_.path());
+        const dosimetry::Setup setup = setupFrom(readSetupFile(full), full);
+        if (!mayReplace()) return;
+        session_.adopt(setup, full);
+        preferences::addRecentFile(full);
     } catch (const InputError& error) {
         say(QString::fromUtf8(error.what()));
     }
 }
 
-void MainWindow::offerRecovery(const dosimetry::Setup& setup, const QString& path) {
-    const QString what = path.isEmpty() ? tr("an assessment without a file") : path;
-    const auto answer = QMessageBox::question(
-        this, tr("Unsaved work found"),
-        tr("The program ended without saving its changes of %1. Take them up again?").arg(what));
-    if (answer == QMessageBox::Yes) session_.recover(setup, path);
+void MainWindow::offerRecovery(Recovery& recovery) {
+    while (const auto leftover = recovery.findLeftover()) {
+        const QString what = leftover->path.isEmpty() ? tr("an assessment without a file") : leftover->path;
+        QMessageBox box(QMessageBox::Question, tr("Unsaved work found"),
+                        tr("The program ended on %1 without saving its changes of %2. Take them up again?")
+                            .arg(QLocale().toString(leftover->time, QLocale::ShortFormat), what),
+                        QMessageBox::NoButton, this);
+        box.setTextFormat(Qt::PlainText);
+        QPushButton* takeUp = box.addButton(tr("Take up again"), QMessageBox::AcceptRole);
+        QPushButton* discard = box.addButton(tr("Discard"), QMessageBox::DestructiveRole);
+        QPushButton* later = box.addButton(tr("Ask again later"), QMessageBox::RejectRole);
+        box.setEscapeButton(later);
+        box.setDefaultButton(takeUp);
+        box.exec();
+        if (box.clickedButton() == takeUp) {
+            session_.recover(leftover->setup, leftover->path);
+            recovery.update();  // the new copy stands before the old one goes
+        }
+        if (box.clickedButton() == takeUp || box.clickedButton() == discard) recovery.discard(*leftover);
+        if (box.clickedButton() != discard) break;
+    }
+    for (const QString& copy : recovery.unreadable())
+        say(tr("A copy of unsaved work cannot be read and was kept: %1").arg(copy));
 }
 
 bool MainWindow::mayReplace() {
@@ -215,10 +237,8 @@ bool MainWindow::save() {
 
 bool MainWindow::saveAs() {
     if (!noInvalidField(tr("Not saved"))) return false;
-    const QString path =
-        QFileDialog::getSaveFileName(this, tr("Save the assessment"), session_.path(), assessmentFilter());
-    if (path.isEmpty()) return false;
-    return saveTo(QFileInfo(path).suffix().isEmpty() ? path + ".toml" : path);
+    const QString path = askSavePath(tr("Save the assessment"), assessmentFilter(), "toml", session_.path());
+    return !path.isEmpty() && saveTo(path);
 }
 
 bool MainWindow::saveTo(const QString& path) {
@@ -242,15 +262,40 @@ bool MainWindow::readyForSheet() {
 
 void MainWindow::exportSheet() {
     if (!readyForSheet()) return;
-    const QString path = QFileDialog::getSaveFileName(this, tr("Sheet as PDF"), {}, tr("PDF (*.pdf)"));
+    QString suggested = session_.path().isEmpty()
+                            ? QString()
+                            : QFileInfo(session_.path()).path() + "/" +
+                                  QFileInfo(session_.path()).completeBaseName() + ".pdf";
+    const QString path = askSavePath(tr("Sheet as PDF"), tr("PDF (*.pdf)"), "pdf", suggested);
     if (path.isEmpty()) return;
+    if (QFileInfo(path) == QFileInfo(session_.path())) {
+        say(tr("The sheet would replace the assessment file. Choose another name."));
+        return;
+    }
     try {
-        writeSheetPdf(QFileInfo(path).suffix().isEmpty() ? path + ".pdf" : path, session_.setup(),
-                      session_.assessment(), session_.fileBytes(), paperSize(preferences::paper()));
+        writeSheetPdf(path, session_.setup(), session_.assessment(), session_.fileBytes(),
+                      paperSize(preferences::paper()));
         statusBar()->showMessage(tr("Sheet written: %1").arg(path), 8000);
     } catch (const InputError& error) {
         say(QString::fromUtf8(error.what()));
     }
+}
+
+QString MainWindow::askSavePath(const QString& title, const QString& filter, const QString& suffix,
+                                const QString& suggested) {
+    QFileDialog dialog(this, title, suggested, filter);
+    dialog.setAcceptMode(QFileDialog::AcceptSave);
+    dialog.setDefaultSuffix(
+        suffix);  // so that the question about an existing file is asked for the full name
+    if (!suggested.isEmpty()) dialog.selectFile(suggested);
+    if (dialog.exec() != QDialog::Accepted || dialog.selectedFiles().isEmpty()) return {};
+    const QString path = dialog.selectedFiles().first();
+    // the dialog takes "laser v1.5" for a name with a suffix
+    if (QFileInfo(path).suffix().compare(suffix, Qt::CaseInsensitive) == 0) return path;
+    const QString full = path + "." + suffix;
+    if (!QFileInfo::exists(full)) return full;
+    const auto answer = QMessageBox::question(this, title, tr("%1 exists already. Replace it?").arg(full));
+    return answer == QMessageBox::Yes ? full : QString();
 }
 
 void MainWindow::printSheet() {
@@ -290,5 +335,5 @@ void MainWindow::dragEnterEvent(QDragEnterEvent* event) {
 
 void MainWindow::dropEvent(QDropEvent* event) {
     const QList<QUrl> urls = event->mimeData()->urls();
-    if (!urls.isEmpty() && urls.first().isLocalFile() && mayReplace()) openFile(urls.first().toLocalFile());
+    if (!urls.isEmpty() && urls.first().isLocalFile()) openFile(urls.first().toLocalFile());
 }

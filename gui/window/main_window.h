@@ -2,12 +2,11 @@
 
 #include <QMainWindow>
 
-#include "assessment/setup.h"
-
 class ChartWidget;
 class MarginsView;
 class QMenu;
 class QSplitter;
+class Recovery;
 class RouteView;
 class Session;
 class SetupPanel;
@@ -20,10 +19,10 @@ class MainWindow : public QMainWindow {
 
   public:
     explicit MainWindow(Session& session, QWidget* parent = nullptr);
-    /// Opens a file, or says in a message why it cannot be opened.
+    /// Opens a file if the present work may be replaced, or says in a message why it cannot be opened.
     void openFile(const QString& path);
     /// Asks whether work that an earlier run left unsaved should be taken up again.
-    void offerRecovery(const dosimetry::Setup& setup, const QString& path);
+    void offerRecovery(Recovery& recovery);
 
   protected:
     void closeEvent(QCloseEvent* event) override;
@@ -46,6 +45,10 @@ class MainWindow : public QMainWindow {
     /// covered.
     bool readyForSheet();
     bool noInvalidField(const QString& what);
+    /// The name chosen for a file to write, with its suffix; empty if none was. Asks before an existing file
+    /// is replaced.
+    QString askSavePath(const QString& title, const QString& filter, const QString& suffix,
+                        const QString& suggested);
     void say(const QString& text);
 
     Session& session_;

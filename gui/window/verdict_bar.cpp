@@ -92,12 +92,13 @@ void VerdictBar::showState() {
     } else {
         const PositionAssessment& position =
             assessment.positions[static_cast<std::size_t>(session_.currentPosition())];
-        sign = position.within_limits() ? Sign::within : Sign::above;
+        sign = assessment.within_limits() ? Sign::within : Sign::above;
         text = QString::fromStdString(verdict(position));
         QStringList others;
         for (const PositionAssessment& p : assessment.positions)
             if (&p != &position && !p.within_limits()) others += QString::fromStdString("“" + p.id + "”");
-        if (!others.isEmpty()) text += " " + tr("Above the limit too: %1.").arg(others.join(", "));
+        if (!others.isEmpty())
+            text += " " + tr("Other positions above the limit: %1.").arg(others.join(", "));
     }
     if (session_.hasInvalidField()) {
         sign = Sign::open;

@@ -143,6 +143,16 @@ TEST(Cautions, ShortExposuresMustRestOnSomething) {
     EXPECT_FALSE(has(assessed(setup).assumptions, "presumes the aversion response"));
 }
 
+// By hand: the sample gives the eye 5103.834 times its limit, shown with three digits, rounded up.
+TEST(Cautions, ATissueLeftOutThoughItIsInDanger) {
+    dosimetry::Setup setup = green_setup();
+    setup.positions[0].eye = false;
+    EXPECT_TRUE(
+        has(assessed(setup).cautions, "the eye is not assessed, but it would receive 5110 times its limit"));
+    setup.sources[0].power = Stated<RadiantPower>("0.1 mW");
+    EXPECT_FALSE(has(assessed(setup).cautions, "is not assessed"));
+}
+
 TEST(Cautions, LessDivergenceThanDiffractionAllows) {
     dosimetry::Setup setup = green_setup();
     EXPECT_FALSE(has(assessed(setup).cautions, "diffraction"));

@@ -53,10 +53,29 @@ TEST(Report, HoldsEveryAnswer) {
 TEST(Report, VerdictsBelowAndAboveTheLimit) {
     dosimetry::Setup setup = green_setup();
     EXPECT_EQ(verdict(assessed(setup).positions[0]),
-              "At 0.5 m the eye would receive 5104 times the limit (retinal thermal).");
+              "ABOVE THE LIMIT. At 0.5 m the eye would receive 5104 times the limit (retinal thermal).");
     setup.sources[0].power = Stated<RadiantPower>("0.5 mW");
-    EXPECT_EQ(verdict(assessed(setup).positions[0]),
-              "At 0.5 m the eye would receive at most 0.511 of the limit (retinal thermal).");
+    EXPECT_EQ(
+        verdict(assessed(setup).positions[0]),
+        "Within the limits. At 0.5 m the eye would receive at most 0.511 of the limit (retinal thermal).");
+}
+
+TEST(Report, ATissueLeftOutIsNamed) {
+    dosimetry::Setup setup = green_setup();
+    setup.positions[0].eye = false;
+    const Assessment assessment = assessed(setup);
+    EXPECT_NE(verdict(assessment.positions[0]).find("The eye is NOT assessed."), std::string::npos);
+    EXPECT_NE(report(setup, assessment).find("(skin only)"), std::string::npos);
+}
+
+TEST(Report, DensitiesAreRoundedUpToHundredths) {
+    EXPECT_EQ(density_text(0), "0");
+    EXPECT_EQ(density_text(3.7), "3.70");
+    EXPECT_EQ(density_text(3.700001), "3.71");
+    EXPECT_EQ(density_text(3.707897), "3.71");
+    EXPECT_EQ(density_text(0.001), "0.01");
+    EXPECT_EQ(density_text(0.991), "1.00");
+    EXPECT_EQ(density_text(12.05), "12.05");
 }
 
 TEST(Report, DistancesAndDurationsInWords) {
@@ -102,7 +121,8 @@ RC_GTEST_PROP(ReportProperty, DistancesAreNeverShownShorterNorDurationsLonger, (
 TEST(Report, JustAboveTheLimitNeverReadsAsTheLimit) {
     PositionAssessment p = assessed(green_setup()).positions[0];
     p.governing.ratio = 1.00001;
-    EXPECT_EQ(verdict(p), "At 0.5 m the eye would receive 1.001 times the limit (retinal thermal).");
+    EXPECT_EQ(verdict(p),
+              "ABOVE THE LIMIT. At 0.5 m the eye would receive 1.001 times the limit (retinal thermal).");
 }
 
 }  // namespace

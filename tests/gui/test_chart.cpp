@@ -53,6 +53,33 @@ TEST(Chart, ThinningKeepsTheCurveAndTheEnds) {
     EXPECT_EQ(kept.back().y, points.back().y);
 }
 
+TEST(Chart, ThinnedCurvesStayWithinATenthOfAPercent) {
+    Session session;
+    for (const char* power : {"2 W", "30 uW", "1 kW"}) {
+        dosimetry::Setup next = session.setup();
+        next.sources.front().power = dosimetry::Stated<dosimetry::RadiantPower>(power);
+        next.sources.front().beam.profile =
+            power[0] == '3' ? dosimetry::Profile::top_hat : dosimetry::Profile::gaussian;
+        session.edit(next, "power");
+        std::vector<ChartPoint> points;
+        const auto laser = dosimetry::make_laser(session.setup().sources.front());
+        for (int i = 0; i <= 360; ++i) {
+            const double z = std::pow(10.0, -2 + i / 60.0);
+            points.push_back(
+                {z, laser.beam.fraction_through(dosimetry::millimetres(7), dosimetry::metres(z))});
+        }
+        const auto kept = thinned(points);
+        EXPECT_LT(kept.size(), points.size() / 2);
+        std::size_t k = 0;
+        for (const ChartPoint& p : points) {
+            while (kept[k + 1].x < p.x) ++k;
+            const double share = std::log(p.x / kept[k].x) / std::log(kept[k + 1].x / kept[k].x);
+            const double shown = kept[k].y * std::pow(kept[k + 1].y / kept[k].y, share);
+            EXPECT_NEAR(shown / p.y, 1.0, 1e-3) << p.x;
+        }
+    }
+}
+
 TEST(Chart, EveryPointOfTheDistanceChartIsPositiveAndOnTheAxes) {
     const Session session;
     const RouteModel route = RouteModel::of(session.setup(), session.assessment(), 0);

@@ -81,6 +81,56 @@ TEST(Margins, ChoosingARowShowsItsTrailAndAnEditKeepsTheChoice) {
     EXPECT_EQ(answers->currentIndex().row(), 0);
 }
 
+TEST(Margins, AnAnswerCanBeChosenAgain) {
+    Session session;
+    MarginsView view(session);
+    view.show();
+    std::string subject;
+    QObject::connect(&view, &MarginsView::trailChosen, [&](const Trail& trail) { subject = trail.subject; });
+    auto* answers = view.findChild<QTableView*>("answers");
+    answers->selectRow(2);
+    const std::string first = subject;
+    view.findChild<QTableView*>("margins")->selectRow(0);
+    EXPECT_NE(subject, first);
+    answers->selectRow(2);
+    EXPECT_EQ(subject, first);
+}
+
+TEST(Margins, TheChosenEffectComesBackWhenItApplies) {
+    Session session;
+    dosimetry::Setup blue = session.setup();
+    blue.sources.front().wavelength = Stated<Length>("450 nm");
+    blue.positions[0].exposure = Stated<Duration>("100 s");
+    session.edit(blue, "blue");
+    MarginsView view(session);
+    view.show();
+    std::string subject;
+    QObject::connect(&view, &MarginsView::trailChosen, [&](const Trail& trail) { subject = trail.subject; });
+    view.announceTrail();
+    view.findChild<QTableView*>("margins")->selectRow(0);
+    EXPECT_TRUE(subject.starts_with("eye, retinal photochemical")) << subject;
+    dosimetry::Setup brief = session.setup();
+    brief.positions[0].exposure = Stated<Duration>("5 s");
+    session.edit(brief, "5 s");
+    EXPECT_TRUE(subject.starts_with("eye, retinal thermal")) << subject;
+    session.undoStack()->undo();
+    EXPECT_TRUE(subject.starts_with("eye, retinal photochemical")) << subject;
+}
+
+TEST(Margins, AnswersForOneTissueSaySo) {
+    Session session;
+    dosimetry::Setup next = session.setup();
+    next.positions[0].eye = false;
+    session.edit(next, "skin only");
+    const AnswersModel model(session);
+    bool found = false;
+    for (int row = 0; row < model.rowCount(); ++row)
+        found = found || model.index(row, 1).data().toString().endsWith("(skin only)");
+    EXPECT_TRUE(found);
+    EXPECT_TRUE(session.assessment().cautions.front().find("the eye is not assessed, but it would receive") !=
+                std::string::npos);
+}
+
 TEST(Margins, StaleAnswersAreGreyed) {
     Session session;
     MarginsView view(session);

@@ -66,6 +66,22 @@ TEST(Program, AnOutputThatCannotBeWrittenIsNamed) {
         << result.errors.toStdString();
 }
 
+TEST(Program, TheSheetNeverReplacesItsOwnAssessment) {
+    const QTemporaryDir folder;
+    const QString file = folder.filePath("a.toml");
+    const QByteArray bytes = bytesOf(EXAMPLE_FILE);
+    writeBytes(file, bytes);
+    EXPECT_EQ(call({"--sheet", file, file}).exitCode, 2);
+    EXPECT_EQ(call({"--sheet", folder.path() + "/./a.toml", file}).exitCode, 2);
+    EXPECT_EQ(bytesOf(file), bytes);
+}
+
+TEST(Program, ADeviceIsNotReplaced) {
+    const Call result = call({"--sheet", "/dev/null", EXAMPLE_FILE});
+    EXPECT_EQ(result.exitCode, 2);
+    EXPECT_TRUE(result.errors.contains("no ordinary file"));
+}
+
 TEST(Program, WrongCallsAreRefused) {
     const QTemporaryDir folder;
     EXPECT_EQ(call({"--sheet", folder.filePath("s.pdf")}).exitCode, 2);

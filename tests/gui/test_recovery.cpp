@@ -58,15 +58,17 @@ TEST(Recovery, WorkOfAKilledProgramIsFoundWithItsFileName) {
     leaveBehind(folder, "# unsaved changes of: /home/somebody/ring laser.toml\n" + session.fileBytes());
     Session next;
     Recovery recovery(next, folder.path());
-    const auto leftover = recovery.takeLeftover();
+    const auto leftover = recovery.findLeftover();
     ASSERT_TRUE(leftover.has_value());
     EXPECT_EQ(leftover->setup, session.setup());
     EXPECT_EQ(leftover->path, "/home/somebody/ring laser.toml");
+    EXPECT_TRUE(recovery.findLeftover().has_value()) << "it stays until it is discarded";
     next.recover(leftover->setup, leftover->path);
     EXPECT_TRUE(next.isModified());
     recovery.update();
+    recovery.discard(*leftover);
     EXPECT_EQ(copies(folder).size(), 1) << "the recovered work is guarded again";
-    EXPECT_FALSE(recovery.takeLeftover().has_value());
+    EXPECT_FALSE(recovery.findLeftover().has_value());
 }
 
 TEST(Recovery, WorkOfARunningProgramIsLeftAlone) {
@@ -77,7 +79,7 @@ TEST(Recovery, WorkOfARunningProgramIsLeftAlone) {
     running.update();
     Session other;
     Recovery recovery(other, folder.path());
-    EXPECT_FALSE(recovery.takeLeftover().has_value());
+    EXPECT_FALSE(recovery.findLeftover().has_value());
     EXPECT_EQ(copies(folder).size(), 1);
 }
 
@@ -86,6 +88,7 @@ TEST(Recovery, AnUnreadableCopyIsKeptAside) {
     leaveBehind(folder, "format = 1\nhalf a li");
     Session session;
     Recovery recovery(session, folder.path());
-    EXPECT_FALSE(recovery.takeLeftover().has_value());
+    EXPECT_FALSE(recovery.findLeftover().has_value());
     EXPECT_EQ(bytesOf(folder.filePath("gone.toml.unreadable")), "format = 1\nhalf a li");
+    EXPECT_EQ(recovery.unreadable(), QStringList(folder.filePath("gone.toml.unreadable")));
 }

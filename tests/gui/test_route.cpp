@@ -80,7 +80,7 @@ TEST(Route, AWeakBeamIsWithinTheLimits) {
     const RouteModel model = modelOf(session);
     EXPECT_TRUE(model.zones.empty());
     ASSERT_EQ(model.remarks.size(), 2U);
-    EXPECT_EQ(model.remarks.front().text, "eye: within the limits along the whole beam");
+    EXPECT_EQ(model.remarks.front().text, "eye, 0.25 s: within the limits along the whole beam");
 }
 
 TEST(Route, ArrowKeysMoveThePersonAsOneUndoStep) {
@@ -105,8 +105,8 @@ TEST(Route, DraggingPutsThePersonWhereThePointerIs) {
     view.show();
     const RouteModel model = view.model();
     const RouteLayout layout(model, view.rect(), QFontMetricsF(view.font()).height());
-    const QPoint start = layout.personRect(model.people[0]).center().toPoint();
-    const QPoint end(static_cast<int>(layout.xOf(metres(50))), start.y());
+    const QPoint start = layout.personRect(model.people[0]).center().toPoint() + QPoint(4, 0);
+    const QPoint end(static_cast<int>(layout.xOf(metres(50))) + 4, start.y());
     QTest::mousePress(&view, Qt::LeftButton, {}, start);
     QTest::mouseMove(&view, (start + end) / 2);
     QTest::mouseMove(&view, end);
@@ -124,6 +124,51 @@ TEST(Route, DraggedDistancesReadAsTyped) {
 TEST(Route, DescribesItselfToScreenReaders) {
     Session session;
     const RouteView view(session);
-    EXPECT_TRUE(view.accessibleDescription().contains("eye: above the limit up to 298.2 m"));
+    EXPECT_TRUE(view.accessibleDescription().contains("eye, 0.25 s: above the limit up to 298.2 m"));
     EXPECT_TRUE(view.accessibleDescription().contains("2042 times the limit"));
+}
+
+TEST(Route, AClickMovesNobody) {
+    Session session;
+    RouteView view(session);
+    view.resize(800, 400);
+    view.show();
+    const RouteLayout layout(view.model(), view.rect(), QFontMetricsF(view.font()).height());
+    const QPoint at = layout.personRect(view.model().people[0]).center().toPoint() + QPoint(6, 3);
+    QTest::mousePress(&view, Qt::LeftButton, {}, at);
+    QTest::mouseMove(&view, at + QPoint(0, 1));
+    QTest::mouseRelease(&view, Qt::LeftButton, {}, at + QPoint(0, 1));
+    EXPECT_EQ(session.setup().positions[0].at.text, "0.8 m");
+}
+
+// One position has 0.25 s, the other 100 s: on the sheet the zone must reach as far as anybody is in danger.
+TEST(Route, OnTheSheetNobodyAboveALimitStandsOutsideTheZone) {
+    Session session;
+    dosimetry::Setup next = session.setup();
+    PositionSetup corridor = next.positions[0];
+    corridor.id = "corridor";
+    corridor.at = Stated<Length>("350 m");
+    corridor.exposure = Stated<Duration>("100 s");
+    next.positions.push_back(corridor);
+    session.edit(next, "corridor");
+    const RouteModel model = RouteModel::of(session.setup(), session.assessment(), std::nullopt);
+    const RouteZone* eye = zoneOf(model, Tissue::eye);
+    ASSERT_NE(eye, nullptr);
+    for (const RoutePerson& person : model.people) {
+        if (person.ratio > 1.0) {
+            EXPECT_LT(person.at.value, eye->to) << person.id;
+        }
+    }
+    EXPECT_TRUE(eye->label.starts_with("eye, 100 s: ")) << eye->label;
+}
+
+TEST(Route, TheAxisEndsWithTheSearch) {
+    Session session;
+    dosimetry::Setup next = session.setup();
+    next.sources.front().power = Stated<RadiantPower>("1e14 W");
+    session.edit(next, "power");
+    const RouteModel model = modelOf(session);
+    EXPECT_EQ(model.to, farthest_search);
+    EXPECT_TRUE(zoneOf(model, Tissue::eye)->label.ends_with("beyond 1000 km"))
+        << zoneOf(model, Tissue::eye)->label;
 }

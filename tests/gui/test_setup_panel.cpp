@@ -1,8 +1,10 @@
 #include <gtest/gtest.h>
 
+#include <QApplication>
 #include <QComboBox>
 #include <QLabel>
 #include <QPushButton>
+#include <QWheelEvent>
 
 #include "session/session.h"
 #include "setup_panel/beam_form.h"
@@ -78,14 +80,67 @@ TEST(SetupPanel, TissuesBelongToTheChosenPosition) {
     EXPECT_EQ(panel.findChild<QComboBox*>("position.tissues")->currentIndex(), 0);
 }
 
-TEST(SetupPanel, AnInvalidTextDoesNotFollowToAnotherPosition) {
+TEST(SetupPanel, APositionWithAnInvalidTextIsNotLeft) {
     Session session;
     SetupPanel panel(session);
     panel.show();
     QTest::mouseClick(panel.findChild<QPushButton*>("position.add"), Qt::LeftButton);
     type(panel, "position.at", "12 W");
-    EXPECT_TRUE(session.hasInvalidField());
-    choose(panel, "position.chosen", 0);
+    session.setCurrentPosition(0);
+    EXPECT_EQ(session.currentPosition(), 1);
+    EXPECT_FALSE(panel.findChild<QComboBox*>("position.chosen")->isEnabled());
+    type(panel, "position.at", "12 m");
+    session.setCurrentPosition(0);
+    EXPECT_EQ(session.currentPosition(), 0);
+}
+
+TEST(SetupPanel, TheMouseWheelChangesNothing) {
+    Session session;
+    SetupPanel panel(session);
+    panel.show();
+    const auto before = session.setup();
+    for (QComboBox* box : panel.findChildren<QComboBox*>()) {
+        QWheelEvent wheel(QPointF(5, 5), box->mapToGlobal(QPointF(5, 5)), {}, QPoint(0, -120), Qt::NoButton,
+                          Qt::NoModifier, Qt::NoScrollPhase, false);
+        QApplication::sendEvent(box, &wheel);
+    }
+    EXPECT_EQ(session.setup(), before);
+}
+
+TEST(SetupPanel, ARestatementThatWouldChangeTheBeamIsRefusedWithAReason) {
+    Session session;
+    SetupPanel panel(session);
+    panel.show();
+    type(panel, "beam.divergence", "0.1 mrad");  // 2.2 mm at 532 nm cannot spread less than 0.308 mrad
+    const auto before = session.setup();
+    choose(panel, "beam.spread", static_cast<int>(Spread::m2));
+    EXPECT_EQ(session.setup(), before);
     EXPECT_FALSE(session.hasInvalidField());
+    bool shown = false;
+    for (const QLabel* label : panel.findChildren<QLabel*>())
+        shown = shown ||
+                (label->isVisible() && QString(label->text()).remove(QChar(0x200B)).contains("diffraction"));
+    EXPECT_TRUE(shown);
+}
+
+TEST(SetupPanel, AHiddenFieldHoldsNothingInvalid) {
+    Session session;
+    SetupPanel panel(session);
+    panel.show();
+    type(panel, "beam.divergence", "5 W");
+    EXPECT_TRUE(session.hasInvalidField());
+    choose(panel, "beam.spread", static_cast<int>(Spread::m2));
+    EXPECT_FALSE(session.hasInvalidField());
+}
+
+TEST(SetupPanel, UndoShowsThePositionThatItChanges) {
+    Session session;
+    SetupPanel panel(session);
+    panel.show();
+    QTest::mouseClick(panel.findChild<QPushButton*>("position.add"), Qt::LeftButton);
+    type(panel, "position.at", "12 m");
+    session.setCurrentPosition(0);
+    session.undoStack()->undo();
+    EXPECT_EQ(session.currentPosition(), 1);
     EXPECT_EQ(panel.findChild<QLineEdit*>("position.at")->text(), "0.8 m");
 }
