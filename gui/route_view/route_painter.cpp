@@ -141,8 +141,8 @@ void paintBeam(QPainter& painter, const RouteModel& model, const RouteLayout& la
                      metrics.elidedText(text(model.sourceId), Qt::ElideRight, box.width() - 4));
     const QString wide = QStringLiteral("⌀ ") + text(format(model.diameters.back(), 3, Rounding::up));
     const double width = metrics.horizontalAdvance(wide) + metrics.averageCharWidth();
-    const QRectF label(layout.plot.right() - width, layout.axisY - metrics.height() / 2, width,
-                       metrics.height());
+    const QRectF label(layout.plot.right() - width, layout.axisY - layout.halfHeight - metrics.height() * 0.5,
+                       width, metrics.height());
     painter.fillRect(label, style.paper);
     painter.setPen(style.ink);
     painter.drawText(label, Qt::AlignCenter, wide);

@@ -107,7 +107,12 @@ PositionForm::PositionForm(Session& session, QWidget* parent)
 
 void PositionForm::showPositions() {
     chosen_->clear();
-    for (const PositionSetup& p : session_.setup().positions) chosen_->addItem(QString::fromStdString(p.id));
+    const auto& positions = session_.setup().positions;
+    for (std::size_t i = 0; i < positions.size(); ++i) {
+        const QString name = QString::fromStdString(positions[i].id);
+        chosen_->addItem(positions.size() > 1 ? QString("%1. ").arg(i + 1) + name
+                                              : name);  // numbers as in the drawing
+    }
     chosen_->setCurrentIndex(session_.currentPosition());
     showValidity();
 }

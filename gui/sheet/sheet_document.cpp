@@ -28,15 +28,16 @@ QString styleSheet() {
         "table.grid td, table.grid th { border: 0.5px solid #606060; }");
 }
 
-/// The frame together with the tables that follow it directly: the margins of a position and its other
-/// values.
+/// A table of margins together with the table of other values that follows it directly; other tables alone.
 QRectF groupRect(const QTextDocument& document, QTextFrame* first) {
     QRectF rect = document.documentLayout()->frameBoundingRect(first);
+    const auto* table = qobject_cast<QTextTable*>(first);
+    if (!table || table->columns() <= 2) return rect;
     const QList<QTextFrame*> frames = document.rootFrame()->childFrames();
     for (qsizetype i = frames.indexOf(first) + 1; i < frames.size(); ++i) {
         const bool directly = document.findBlock(frames[i]->firstPosition() - 1).text().isEmpty() &&
                               frames[i]->firstPosition() - frames[i - 1]->lastPosition() <= 3;
-        if (!directly || first->frameFormat().border() == 0.0) break;
+        if (!directly) break;
         rect |= document.documentLayout()->frameBoundingRect(frames[i]);
     }
     return rect;

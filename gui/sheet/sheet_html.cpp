@@ -122,18 +122,22 @@ QString limitsPart(const Assessment& assessment) {
 QString marginsPart(const Assessment& assessment, const PositionAssessment& p) {
     QString html = "<h3>" + tr("Position") + " " + numbered(assessment, p) + ": " + escaped(p.at.text) + " " +
                    tr("from the exit") + ", " + tr("exposure") + " " + escaped(p.exposure.text) + "</h3>";
-    html += "<table width='100%' class='grid' cellpadding='4' cellspacing='0'><thead><tr><th align='left'>" +
-            tr("Tissue, effect") + "</th><th align='right'>" + tr("Exposure") + "</th><th align='right'>" +
-            tr("Limit") + "</th><th align='right'>" + tr("Ratio") + "</th><th align='right'>" + tr("Margin") +
-            "</th><th align='right'>" + tr("Averaged over") + "</th><th align='left'>" + tr("Clause") +
-            "</th></tr></thead>";
+    html +=
+        "<table width='100%' class='grid' cellpadding='4' cellspacing='0'><thead><tr><th align='left' "
+        "width='23%'>" +
+        tr("Tissue, effect") + "</th><th align='right'>" + tr("Exposure") + "</th><th align='right'>" +
+        tr("Limit") + "</th><th align='right'>" + tr("Ratio") + "</th><th align='right'>" + tr("Margin") +
+        "</th><th align='right'>" + tr("Averaged over") + "</th><th align='left'>" + tr("Clause") +
+        "</th></tr></thead>";
     const Criterion* governing = p.governing_criterion();
     for (const Criterion& c : p.criteria) {
         const bool governs = &c == governing;
         const QString open = governs ? "<b>" : "";
         const QString close = governs ? "</b>" : "";
         const auto cell = [&](const QString& align, const QString& text) {
-            return "<td align='" + align + "'>" + open + text + close + "</td>";
+            // numbers stay in one piece with their units
+            const QString wrap = align == "right" ? " style='white-space:nowrap'" : "";
+            return "<td align='" + align + "'" + wrap + ">" + open + text + close + "</td>";
         };
         html += "<tr>" +
                 cell("left", escaped(name_of(c.tissue, c.effect)) +
@@ -142,7 +146,7 @@ QString marginsPart(const Assessment& assessment, const PositionAssessment& p) {
                 cell("right", escaped(format_number(c.ratio, 4, Rounding::up))) +
                 cell("right", escaped(format_number(c.margin(), 3, Rounding::down))) +
                 cell("right", "⌀ " + escaped(format(c.aperture, 3, Rounding::nearest))) +
-                cell("left", escaped(c.limit_set + ", " + c.clause)) + "</tr>";
+                cell("left", escaped(assessment.limit_sets.size() > 1 ? c.limit_set + ", " + c.clause : c.clause)) + "</tr>";
     }
     html += "</table>";
     Facts facts;
@@ -228,7 +232,7 @@ QString sheetHtml(const Setup& setup, const Assessment& assessment, const QStrin
     html += head(tr("Hazard distances along the direct beam, unaided")) + distancesPart(assessment);
     html += head(tr("Assumptions")) + list(assessment.assumptions);
     html += head(tr("Cautions")) + list(assessment.cautions);
-    html += head(tr("Signatures")) + "<p>" + titleOf(setup) + "<br/><b>" + overall(assessment) + "</b></p>" +
+    html += head(tr("Signatures")) + "<h3>" + titleOf(setup) + ". " + overall(assessment) + "</h3>" +
             signatures();
     html += "<div style='page-break-before:always'>" + head(tr("Appendix: how each number came about")) +
             "<p>" +
