@@ -122,22 +122,26 @@ QString limitsPart(const Assessment& assessment) {
 QString marginsPart(const Assessment& assessment, const PositionAssessment& p) {
     QString html = "<h3>" + tr("Position") + " " + numbered(assessment, p) + ": " + escaped(p.at.text) + " " +
                    tr("from the exit") + ", " + tr("exposure") + " " + escaped(p.exposure.text) + "</h3>";
-    html +=
-        "<table width='100%' class='grid' cellpadding='4' cellspacing='0'><thead><tr><th align='left' "
-        "width='23%'>" +
-        tr("Tissue, effect") + "</th><th align='right'>" + tr("Exposure") + "</th><th align='right'>" +
-        tr("Limit") + "</th><th align='right'>" + tr("Ratio") + "</th><th align='right'>" + tr("Margin") +
-        "</th><th align='right'>" + tr("Averaged over") + "</th><th align='left'>" + tr("Clause") +
-        "</th></tr></thead>";
+    html += "<table width='100%' class='grid' cellpadding='4' cellspacing='0'><thead><tr>";
+    // widths that hold six digits with their unit in one line
+    const auto column = [&html](const char* align, int percent, const QString& text) {
+        html += QString("<th align='%1' width='%2%'>").arg(align).arg(percent) + text + "</th>";
+    };
+    column("left", 23, tr("Tissue, effect"));
+    column("right", 16, tr("Exposure"));
+    column("right", 15, tr("Limit"));
+    column("right", 12, tr("Ratio"));
+    column("right", 11, tr("Margin"));
+    column("right", 12, tr("Averaged over"));
+    column("left", 11, tr("Clause"));
+    html += "</tr></thead>";
     const Criterion* governing = p.governing_criterion();
     for (const Criterion& c : p.criteria) {
         const bool governs = &c == governing;
         const QString open = governs ? "<b>" : "";
         const QString close = governs ? "</b>" : "";
         const auto cell = [&](const QString& align, const QString& text) {
-            // numbers stay in one piece with their units
-            const QString wrap = align == "right" ? " style='white-space:nowrap'" : "";
-            return "<td align='" + align + "'" + wrap + ">" + open + text + close + "</td>";
+            return "<td align='" + align + "'>" + open + text + close + "</td>";
         };
         html += "<tr>" +
                 cell("left", escaped(name_of(c.tissue, c.effect)) +
@@ -146,7 +150,9 @@ QString marginsPart(const Assessment& assessment, const PositionAssessment& p) {
                 cell("right", escaped(format_number(c.ratio, 4, Rounding::up))) +
                 cell("right", escaped(format_number(c.margin(), 3, Rounding::down))) +
                 cell("right", "⌀ " + escaped(format(c.aperture, 3, Rounding::nearest))) +
-                cell("left", escaped(assessment.limit_sets.size() > 1 ? c.limit_set + ", " + c.clause : c.clause)) + "</tr>";
+                cell("left",
+                     escaped(assessment.limit_sets.size() > 1 ? c.limit_set + ", " + c.clause : c.clause)) +
+                "</tr>";
     }
     html += "</table>";
     Facts facts;

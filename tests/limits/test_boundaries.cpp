@@ -4,7 +4,7 @@
 #include <limits>
 
 #include "limits/icnirp.h"
-#include "limits/transcription.h"
+#include "limits/printed_rows.h"
 #include "support/expect.h"
 
 namespace dosimetry {
@@ -65,7 +65,7 @@ TEST(EndOfTheEdition, TheReasonIsASentence) {
 }
 
 TEST(Edges, AWavelengthStatedOnAnEdgeStaysOnItWhateverItsBinaryNoise) {
-    for (double nm : transcription::wavelength_breaks_nm) {
+    for (double nm : printed_rows::wavelength_breaks_nm) {
         const double m = nm * 1e-9;
         for (double near : {m, std::nextafter(m, 0.0), std::nextafter(m, 1.0)}) {
             const LimitQuery at{Tissue::eye, nanometres(nm), seconds(1), radians(0), Area{}};
@@ -82,7 +82,7 @@ TEST(Edges, TheStricterSideHoldsOnEveryEdgeInTime) {
         for (double nm : {200.0, 303.0, 310.0, 350.0, 405.0, 488.0, 532.0, 905.0, 1064.0, 1190.0, 1310.0,
                           1390.0, 1450.0, 1600.0, 2000.0, 10600.0, 2e5})
             for (double mrad : {0.0, 20.0, 200.0})
-                for (double t : transcription::duration_breaks_s) {
+                for (double t : printed_rows::duration_breaks_s) {
                     const auto at = [&](double s) {
                         return strictest_J_per_m2(
                             {tissue, nanometres(nm), seconds(s), milliradians(mrad), Area{}});
@@ -96,7 +96,7 @@ TEST(Edges, TheStricterSideHoldsOnEveryEdgeInTime) {
 
 TEST(Edges, TheStricterSideHoldsOnEveryEdgeInWavelength) {
     for (Tissue tissue : {Tissue::eye, Tissue::skin})
-        for (double nm : transcription::wavelength_breaks_nm) {
+        for (double nm : printed_rows::wavelength_breaks_nm) {
             // 303 to 315 nm are printed as whole nanometres, each with its own value
             if (nm == 180 || nm == 1e6 || (nm >= 303 && nm <= 315)) continue;
             for (double t : {1e-12, 5e-11, 5e-10, 1e-8, 1e-6, 8e-6, 1e-4, 0.01, 0.25, 1.0, 50.0, 1e3, 2e4})
@@ -170,7 +170,7 @@ double step_in_time(const LimitQuery& query, double t_s) {
 TEST(Continuity, InTimeOnly10PicosecondsSteps) {
     for (double nm : {200.0,  303.0,  310.0,  350.0,  405.0,  488.0,  532.0,  650.0,  780.0,   905.0, 1030.0,
                       1064.0, 1190.0, 1310.0, 1390.0, 1450.0, 1600.0, 2000.0, 2940.0, 10600.0, 2e5})
-        for (double t : transcription::duration_breaks_s) {
+        for (double t : printed_rows::duration_breaks_s) {
             if (t == 1e-13 || t == 3e4) continue;
             const bool retina = nm >= 400 && nm < 1350;  // above, the anterior limit is the lower one
             if (retina && t == 1e-11) {

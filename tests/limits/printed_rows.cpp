@@ -1,10 +1,10 @@
-#include "limits/transcription.h"
+#include "limits/printed_rows.h"
 
 #include <cmath>
 #include <limits>
 #include <sstream>
 
-namespace transcription {
+namespace printed_rows {
 namespace {
 
 using dosimetry::Effect;
@@ -267,4 +267,4 @@ const std::vector<double> duration_breaks_s{1e-13, 1e-11, 1e-9, 1e-7, 5e-6, 13e-
 const std::vector<double> subtense_breaks_mrad{1.5, 5, 100};
 const std::vector<double> area_breaks_m2{0.01, 0.1};
 
-}  // namespace transcription
+}  // namespace printed_rows

@@ -5,9 +5,9 @@
 
 #include "limits/limit_row.h"
 
-/// A second transcription of ICNIRP 2013, typed from the project's notes and not from limits_tables/, with
+/// A second copy of ICNIRP 2013, typed from the project's notes and not from limits_tables/, with
 /// its own arithmetic. The program's table has to give the same at every point.
-namespace transcription {
+namespace printed_rows {
 
 struct Value {
     dosimetry::Effect effect{};
@@ -42,4 +42,4 @@ extern const std::vector<double> area_breaks_m2;
 
 double factor(const std::string& symbol, double nm, double t_s, double alpha_mrad);
 
-}  // namespace transcription
+}  // namespace printed_rows
