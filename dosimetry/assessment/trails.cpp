@@ -149,7 +149,7 @@ Trail trail_of_criterion(const LaserSetup& stated, const Arrival& arrival, const
     Trail trail;
     const LimitRow& row = *e.limit.row;
     const LimitQuery query = query_for(arrival, exposure, row.tissue);
-    trail.subject = name_of(row.tissue) + ", " + name_of(row.effect) + ": exposure divided by limit";
+    trail.subject = name_of(row.tissue, row.effect) + ": exposure divided by limit";
     trail.steps.push_back({"λ", "wavelength", "", stated.wavelength.text, exact(laser.wavelength), input});
     trail.steps.push_back({"P", "power", "", stated.power.text, exact(laser.power), input});
     trail.steps.push_back({"z", "distance from the exit", "", "", exact(arrival.distance()), input});
@@ -230,12 +230,11 @@ Trail trail_of_permitted_exposure(const PermittedExposure& permitted,
         return trail;
     }
     for (const Evaluated& e : at_permitted)
-        trail.steps.push_back(
-            {"R", name_of(e.limit.row->tissue) + ", " + name_of(e.limit.row->effect) + ", at t_max",
-             "exposure / limit",
-             std::visit([](auto q) { return term(q.in_si()); }, e.exposure) + " / " +
-                 std::visit([](auto q) { return term(q.in_si()); }, e.compared_limit),
-             number(e.ratio), edition.id + ", " + e.limit.row->clause});
+        trail.steps.push_back({"R", name_of(e.limit.row->tissue, e.limit.row->effect) + ", at t_max",
+                               "exposure / limit",
+                               std::visit([](auto q) { return term(q.in_si()); }, e.exposure) + " / " +
+                                   std::visit([](auto q) { return term(q.in_si()); }, e.compared_limit),
+                               number(e.ratio), edition.id + ", " + e.limit.row->clause});
     trail.steps.push_back(
         {"t_max", "longest permitted exposure", "longest t with all R(t') ≤ 1, t' ≤ t", "",
          exact(*permitted.duration) + (permitted.whole_range ? " (end of the published range)" : ""),

@@ -93,10 +93,6 @@ void position_part(std::string& out, const PositionAssessment& p) {
 
 }  // namespace
 
-std::string name_of(Tissue tissue, Effect effect) {
-    return name_of(tissue) + ", " + (effect == Effect::skin_thermal ? "thermal" : name_of(effect));
-}
-
 std::string exposure_text(const Criterion& c) {
     return std::visit([](auto q) { return format(q, 4, Rounding::up); }, c.exposure);
 }

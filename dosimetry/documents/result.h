@@ -17,9 +17,6 @@ std::string result_json(const Setup& setup, const Assessment& assessment, const 
 /// values down.
 std::string report(const Setup& setup, const Assessment& assessment);
 
-/// "eye, retinal thermal", "skin, thermal"
-std::string name_of(Tissue tissue, Effect effect);
-
 /// The two values of a criterion, four digits: exposures rounded up, limits down.
 std::string exposure_text(const Criterion& criterion);
 std::string limit_text(const Criterion& criterion);

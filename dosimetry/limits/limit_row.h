@@ -23,6 +23,8 @@ enum class Effect {
 
 std::string name_of(Tissue tissue);
 std::string name_of(Effect effect);
+/// Both in one: "eye, retinal thermal", "skin, thermal".
+std::string name_of(Tissue tissue, Effect effect);
 
 enum class LimitQuantity { irradiance, radiant_exposure, radiance, radiance_dose };
 

@@ -66,6 +66,10 @@ std::string name_of(Effect effect) {
     return "skin thermal";
 }
 
+std::string name_of(Tissue tissue, Effect effect) {
+    return name_of(tissue) + ", " + (effect == Effect::skin_thermal ? "thermal" : name_of(effect));
+}
+
 std::string unit_of(LimitQuantity quantity) {
     switch (quantity) {
         case LimitQuantity::irradiance:

@@ -79,6 +79,7 @@ class LimitSet {
 
   private:
     friend class LimitSetReader;
+    friend class TableChecks;
     LimitSet() = default;
 
     /// Variables and then factors, by index, as formulas use them.

@@ -1,12 +1,11 @@
 #include <algorithm>
 #include <array>
 #include <cmath>
-#include <limits>
 #include <map>
-#include <set>
 
 #include "limits/limit_set.h"
 #include "limits/sha256.h"
+#include "limits/table_checks.h"
 #include "quantities/decimal.h"
 #include "quantities/format.h"
 #include "toml/strict_table.h"
@@ -14,44 +13,9 @@
 namespace dosimetry {
 namespace {
 
-constexpr double unbounded = std::numeric_limits<double>::infinity();
 constexpr std::size_t most_bytes = 4'000'000;
-constexpr std::size_t variable_count = 4;
 const std::array<std::string, variable_count> variable_names{"wavelength_nm", "t_s", "alpha_mrad", "area_m2"};
-constexpr std::size_t alpha_variable = 2;
-constexpr std::size_t area_variable = 3;
 constexpr std::size_t most_factors = 100;
-
-struct Rectangle {
-    double nm_from, nm_to, s_from, s_to;
-};
-
-struct Section {
-    std::string title;
-    Tissue tissue{};
-    bool alternative_form = false;
-    std::vector<Rectangle> covers;
-    std::size_t first_row = 0, end_row = 0;
-    TextPosition where;
-};
-
-double middle(double a, double b) {
-    return std::sqrt(a * b);
-}
-
-std::vector<double> sorted_unique(std::vector<double> v) {
-    std::sort(v.begin(), v.end());
-    v.erase(std::unique(v.begin(), v.end()), v.end());
-    return v;
-}
-
-/// The edges and a value between each two of them.
-std::vector<double> with_middles(const std::vector<double>& edges) {
-    std::vector<double> values = sorted_unique(edges);
-    for (std::size_t i = 0, n = values.size(); i + 1 < n; ++i)
-        values.push_back(middle(values[i], values[i + 1]));
-    return values;
-}
 
 }  // namespace
 
@@ -82,8 +46,9 @@ class LimitSetReader {
                                                             "alternative_form", "note", "covers", "rows"}))
             read_section(t);
         if (sections_.empty()) throw root_.error("limits", "the table has no limits", "[[limits]]");
-        for (const Section& section : sections_) check_tiling(section);
-        check_edition_covered();
+        const TableChecks checks(set_, file_);
+        for (const TableSection& section : sections_) checks.check_tiling(section);
+        checks.check_edition_covered(sections_);
         return std::move(set_);
     }
 
@@ -261,7 +226,7 @@ class LimitSetReader {
     }
 
     void read_section(const StrictTable& t) {
-        Section section;
+        TableSection section;
         section.title = t.text("title");
         section.where = t.where();
         section.alternative_form = t.flag("alternative_form", false);
@@ -297,7 +262,7 @@ class LimitSetReader {
                 throw r.error("", "a row in D or L stands alone",
                               "alternative_form = true, beside rows in H or E");
             row.clause = r.has("clause") ? clause(r) : clause(t);
-            check_definitions(row, r);
+            TableChecks(set_, file_).check_definitions(row, r);
             set_.rows_.push_back(std::move(row));
         }
         section.end_row = set_.rows_.size();
@@ -341,9 +306,10 @@ class LimitSetReader {
         if (const auto symbol = r.maybe_text("acceptance")) row.acceptance = factor_power(r, *symbol).factor;
         row.depends_on_subtense =
             row.alpha_from_mrad > 0 || row.alpha_to_mrad < unbounded || row.acceptance.has_value();
-        for (std::size_t index : factors_of(row)) {
-            row.depends_on_subtense = row.depends_on_subtense || uses(index, alpha_variable);
-            row.depends_on_area = row.depends_on_area || uses(index, area_variable);
+        for (std::size_t index : factors_of(row, set_.factors_)) {
+            const Factor& factor = set_.factors_[index];
+            row.depends_on_subtense = row.depends_on_subtense || changes_with(factor, alpha_variable);
+            row.depends_on_area = row.depends_on_area || changes_with(factor, area_variable);
         }
         return row;
     }
@@ -381,225 +347,11 @@ class LimitSetReader {
         throw r.error("factors", "unknown factor " + quoted(symbol), known);
     }
 
-    /// Whether the factor itself, without those it is made from, changes with the variable.
-    bool uses(std::size_t index, std::size_t variable) const {
-        const Factor& factor = set_.factors_[index];
-        if (factor.variable == variable && factor.pieces.size() > 1) return true;
-        return std::any_of(factor.pieces.begin(), factor.pieces.end(), [&](const FactorPiece& piece) {
-            const std::vector<std::size_t> used = piece.value.used();
-            return std::find(used.begin(), used.end(), variable) != used.end();
-        });
-    }
-
-    /// The factors of a row, acceptance and ends of its durations included, and those they are made from.
-    std::vector<std::size_t> factors_of(const LimitRow& row) const {
-        std::vector<bool> needed(set_.factors_.size());
-        for (const FactorPower& f : row.factors) needed[f.factor] = true;
-        for (const auto& index : {row.acceptance, row.s_from.factor, row.s_to.factor})
-            if (index) needed[*index] = true;
-        return with_their_own(std::move(needed));
-    }
-
-    /// A factor is made from earlier ones only, so one pass from the last to the first finds them all.
-    std::vector<std::size_t> with_their_own(std::vector<bool> needed) const {
-        std::vector<std::size_t> indices;
-        for (std::size_t i = needed.size(); i-- > 0;) {
-            if (!needed[i]) continue;
-            indices.push_back(i);
-            for (const FactorPiece& piece : set_.factors_[i].pieces) {
-                for (std::size_t used : piece.value.used())
-                    if (used >= variable_count) needed[used - variable_count] = true;
-                for (const auto& index : {piece.from.factor, piece.to.factor})
-                    if (index) needed[*index] = true;
-            }
-        }
-        return indices;
-    }
-
-    /// Each factor and the aperture must be defined over the whole row.
-    void check_definitions(const LimitRow& row, const StrictTable& r) const {
-        const Edition& e = set_.edition_;
-        const Rectangle whole{row.nm_from, row.nm_to, row.s_from.factor ? e.s_from : row.s_from.number,
-                              row.s_to.factor ? e.s_to : row.s_to.number};
-        for (const auto& index : {row.s_from.factor, row.s_to.factor})
-            if (index) check_end(*index, r);
-        std::vector<std::size_t> factors = factors_of(row);
-        const bool retinal =
-            row.effect == Effect::retinal_thermal || row.effect == Effect::retinal_photochemical;
-        if (retinal && set_.alpha_min_) {  // the subtense is never judged below it
-            std::vector<bool> needed(set_.factors_.size());
-            needed[*set_.alpha_min_] = true;
-            const std::vector<std::size_t> more = with_their_own(std::move(needed));
-            factors.insert(factors.end(), more.begin(), more.end());
-        }
-        for (std::size_t index : factors)
-            if (!defined_over(set_.factors_[index], whole))
-                throw r.error(
-                    "factors",
-                    "the factor " + set_.factors_[index].symbol + " is not defined over the whole row",
-                    "a factor whose pieces cover the row");
-        if (!aperture_covers(set_.apertures_[row.aperture], whole))
-            throw r.error(
-                "", "the aperture " + quoted(set_.apertures_[row.aperture].id) + " does not cover this row",
-                "an aperture for its wavelengths and durations");
-    }
-
-    /// Pieces follow one another, so the first and the last end decide.
-    static bool defined_over(const Factor& factor, const Rectangle& whole) {
-        const Bound& first = factor.pieces.front().from;
-        const Bound& last = factor.pieces.back().to;
-        if (first.factor || last.factor) return false;
-        if (factor.variable == 0) return first.number <= whole.nm_from && last.number >= whole.nm_to;
-        if (factor.variable == 1) return first.number <= whole.s_from && last.number >= whole.s_to;
-        return first.number == -unbounded && last.number == unbounded;
-    }
-
-    /// Rows tile rectangles of wavelength and duration for each subtense, so an end may follow the subtense
-    /// only.
-    void check_end(std::size_t index, const StrictTable& r) const {
-        std::vector<bool> needed(set_.factors_.size());
-        needed[index] = true;
-        for (std::size_t i : with_their_own(std::move(needed)))
-            for (std::size_t variable = 0; variable < variable_count; ++variable)
-                if (variable != alpha_variable && uses(i, variable))
-                    throw r.error("s",
-                                  "the factor " + set_.factors_[index].symbol + " depends on " +
-                                      variable_names[variable] + " and cannot be an end of a row",
-                                  "a number, or a factor of alpha_mrad");
-    }
-
-    static bool aperture_covers(const Aperture& aperture, const Rectangle& whole) {
-        std::vector<double> nm_edges{whole.nm_from, whole.nm_to};
-        std::vector<double> s_edges{whole.s_from, whole.s_to};
-        for (const AperturePiece& p : aperture.pieces) {
-            for (double nm : {p.nm_from, p.nm_to})
-                if (nm > whole.nm_from && nm < whole.nm_to) nm_edges.push_back(nm);
-            for (double s : {p.s_from, p.s_to})
-                if (s > whole.s_from && s < whole.s_to) s_edges.push_back(s);
-        }
-        for (double nm : with_middles(nm_edges))
-            for (double s : with_middles(s_edges))
-                if (std::none_of(aperture.pieces.begin(), aperture.pieces.end(), [&](const AperturePiece& p) {
-                        return nm >= p.nm_from && nm <= p.nm_to && s >= p.s_from && s < p.s_to;
-                    }))
-                    return false;
-        return true;
-    }
-
-    /// Subtenses between which nothing changes but the values of formulas, one for each such range.
-    std::vector<double> subtense_samples_mrad() const {
-        std::vector<double> edges{1e-3, 1e4};
-        for (const LimitRow& row : set_.rows_)
-            for (double mrad : {row.alpha_from_mrad, row.alpha_to_mrad})
-                if (mrad > 0 && mrad < 1e4) edges.push_back(mrad);
-        for (const Factor& factor : set_.factors_)
-            if (factor.variable == alpha_variable)
-                for (const FactorPiece& piece : factor.pieces)
-                    if (std::isfinite(piece.to.number) && piece.to.number > 0)
-                        edges.push_back(piece.to.number);
-        edges = sorted_unique(edges);
-        std::vector<double> samples;
-        for (std::size_t i = 0; i + 1 < edges.size(); ++i) samples.push_back(middle(edges[i], edges[i + 1]));
-        return samples;
-    }
-
-    template <class Visit>
-    void for_each_cell(std::size_t first_row, std::size_t end_row, const std::vector<Rectangle>& rectangles,
-                       Visit visit) {
-        for (double alpha : subtense_samples_mrad()) {
-            std::vector<double> nm_edges, s_edges;
-            for (const Rectangle& r : rectangles) {
-                nm_edges.insert(nm_edges.end(), {r.nm_from, r.nm_to});
-                s_edges.insert(s_edges.end(), {r.s_from, r.s_to});
-            }
-            std::vector<double> values =
-                set_.variables_for(set_.edition_.nm_from, set_.edition_.s_from, alpha, 1e-4);
-            for (std::size_t i = first_row; i < end_row; ++i) {
-                const LimitRow& row = set_.rows_[i];
-                nm_edges.insert(nm_edges.end(), {row.nm_from, row.nm_to});
-                s_edges.insert(s_edges.end(),
-                               {set_.bound_value(row.s_from, values), set_.bound_value(row.s_to, values)});
-            }
-            nm_edges = sorted_unique(nm_edges);
-            s_edges = sorted_unique(s_edges);
-            for (std::size_t i = 0; i + 1 < nm_edges.size(); ++i)
-                for (std::size_t j = 0; j + 1 < s_edges.size(); ++j) {
-                    const double nm = middle(nm_edges[i], nm_edges[i + 1]);
-                    const double s = middle(s_edges[j], s_edges[j + 1]);
-                    std::vector<double> at = set_.variables_for(nm, s, alpha, 1e-4);
-                    std::size_t count = 0;
-                    for (std::size_t row = first_row; row < end_row; ++row)
-                        if (set_.applies(set_.rows_[row], at)) {
-                            ++count;
-                            check_value(set_.rows_[row], at);
-                        }
-                    visit(nm, s, alpha, count);
-                }
-        }
-    }
-
-    /// A limit that is not a positive number would compare as "not exceeded".
-    void check_value(const LimitRow& row, std::vector<double>& values) const {
-        const double value = set_.row_value(row, values);
-        const double diameter_mm = set_.aperture_mm(row, values);
-        for (const auto& [what, number] : {std::pair{"limit", value}, std::pair{"aperture", diameter_mm}})
-            if (!(number > 0 && number < unbounded))
-                throw InputError(std::string("the ") + what + " of this row is not a positive number" +
-                                     place(values[0], values[1], values[alpha_variable]),
-                                 "a finite number above zero", "", {file_, row.line, 1});
-    }
-
-    static bool inside(const std::vector<Rectangle>& rectangles, double nm, double s) {
-        return std::any_of(rectangles.begin(), rectangles.end(), [&](const Rectangle& r) {
-            return nm > r.nm_from && nm < r.nm_to && s > r.s_from && s < r.s_to;
-        });
-    }
-
-    static std::string place(double nm, double s, double alpha) {
-        return " at " + exact_number(nm) + " nm, " + exact_number(s) + " s, " + exact_number(alpha) + " mrad";
-    }
-
-    /// The rows of a section tile what it covers: one row everywhere inside, none outside.
-    void check_tiling(const Section& section) {
-        for_each_cell(section.first_row, section.end_row, section.covers,
-                      [&](double nm, double s, double alpha, std::size_t count) {
-                          const bool covered = inside(section.covers, nm, s);
-                          const std::string in = " in " + quoted(section.title) + place(nm, s, alpha);
-                          if (covered && count == 0)
-                              throw InputError("the rows leave a gap" + in,
-                                               "rows that tile what the section covers", "", section.where);
-                          if (count > 1)
-                              throw InputError("the rows overlap" + in,
-                                               "rows that tile what the section covers", "", section.where);
-                          if (!covered && count > 0)
-                              throw InputError("a row reaches outside what is covered" + in,
-                                               "rows that tile what the section covers", "", section.where);
-                      });
-    }
-
-    void check_edition_covered() {
-        const Edition& e = set_.edition_;
-        for (Tissue tissue : {Tissue::eye, Tissue::skin}) {
-            std::vector<Rectangle> all;
-            for (const Section& section : sections_)
-                if (section.tissue == tissue && !section.alternative_form)
-                    all.insert(all.end(), section.covers.begin(), section.covers.end());
-            std::vector<Rectangle> whole{{e.nm_from, e.nm_to, e.s_from, e.s_to}};
-            whole.insert(whole.end(), all.begin(), all.end());
-            for_each_cell(0, 0, whole, [&](double nm, double s, double alpha, std::size_t) {
-                const bool in_edition = nm > e.nm_from && nm < e.nm_to && s > e.s_from && s < e.s_to;
-                if (in_edition && !inside(all, nm, s))
-                    throw InputError("no limit for the " + name_of(tissue) + place(nm, s, alpha),
-                                     "sections that cover the edition's whole range", "", {file_, 1, 1});
-            });
-        }
-    }
-
     std::string file_;
     toml::table document_;
     StrictTable root_;
     std::map<std::string, std::string> provenances_;
-    std::vector<Section> sections_;
+    std::vector<TableSection> sections_;
     LimitSet set_;
 };
 

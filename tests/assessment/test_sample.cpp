@@ -7,13 +7,7 @@
 namespace dosimetry {
 namespace {
 
-using testing_support::agrees;
-using testing_support::assessed;
-using testing_support::criterion;
-using testing_support::green_setup;
-using testing_support::printed;
-using testing_support::relatively_near;
-using testing_support::si;
+using namespace testing_support;
 
 class Sample : public ::testing::Test {
   protected:

@@ -7,14 +7,7 @@
 namespace dosimetry {
 namespace {
 
-using testing_support::agrees;
-using testing_support::assessed;
-using testing_support::criterion;
-using testing_support::green_setup;
-using testing_support::position;
-using testing_support::printed;
-using testing_support::relatively_near;
-using testing_support::si;
+using namespace testing_support;
 
 // A workshop laser: 10.6 µm, 100 W, flat top of 10 mm, 5 mrad, 2 m away, 10 s.
 //   d = √(10² + 10²) mm = 14.1421356 mm; 4 · 100 W / (π d²) = 636619.77 W/m², the same in every aperture

@@ -3,11 +3,13 @@
 #include "documents/setup_document.h"
 #include "limits/limit_library.h"
 #include "support/expect.h"
+#include "support/files.h"
 #include "support/random_setups.h"
 
 namespace dosimetry {
 namespace {
 
+using testing_support::green_file;
 using testing_support::green_setup;
 using testing_support::log_uniform;
 using testing_support::with_unit;
@@ -106,32 +108,7 @@ TEST(WriteSetup, TheFileAPersonWouldWrite) {
     dosimetry::Setup setup = green_setup();
     setup.title = "Alignment";
     setup.date = "2026-12-01";
-    EXPECT_EQ(write_setup(setup), R"(format = 1
-
-[assessment]
-title = "Alignment"
-date = 2026-12-01
-limits = ["icnirp_2013_laser"]
-
-[[source]]
-id = "green"
-kind = "laser"
-wavelength = "532 nm"
-[source.emission]
-mode = "continuous"
-power = "5 W"
-[source.beam]
-profile = "gaussian"
-diameter = "2 mm"
-measured_at = "1/e2"
-divergence = "1 mrad"
-
-[[position]]
-id = "operator"
-at = "0.5 m"
-exposure = "0.25 s"
-tissues = ["eye", "skin"]
-)");
+    EXPECT_EQ(write_setup(setup), green_file);
 }
 
 }  // namespace
