@@ -9,6 +9,16 @@ QString escaped(const std::string& text) {
     return QString::fromStdString(text).toHtmlEscaped();
 }
 
+/// Formula, numbers and result, a line each; a line that says the same as the one before is left out.
+QString calculationHtml(const TrailStep& step) {
+    QStringList lines;
+    if (!step.formula.empty()) lines += "= " + mathHtml(step.formula);
+    if (!step.with_numbers.empty() && step.with_numbers != step.formula)
+        lines += "= " + mathHtml(step.with_numbers);
+    if (step.result != step.with_numbers) lines += "<b>= " + escaped(step.result) + "</b>";
+    return lines.join("<br/>");
+}
+
 }  // namespace
 
 TrailView::TrailView(QWidget* parent) : QTextBrowser(parent) {
@@ -18,8 +28,15 @@ TrailView::TrailView(QWidget* parent) : QTextBrowser(parent) {
     setTabChangesFocus(true);
 }
 
+/// Paragraphs, not the sheet's tables: the view is narrow, and they are laid out in half the time on every
+/// edit.
 void TrailView::showTrail(const Trail& trail) {
-    setHtml("<p><b>" + escaped(trail.subject) + "</b></p>" + trailHtml(trail));
+    QString html = "<p><b>" + escaped(trail.subject) + "</b></p>";
+    for (const TrailStep& step : trail.steps)
+        html += "<p style='margin-top:5px; margin-bottom:5px'><b>" + mathHtml(step.symbol) + "</b>&nbsp; " +
+                escaped(step.meaning) + "<br/>" + calculationHtml(step) + "<br/><i>" + escaped(step.source) +
+                "</i></p>";
+    setHtml(html);
 }
 
 QString mathHtml(const std::string& formula) {
@@ -62,18 +79,10 @@ QString mathHtml(const std::string& formula) {
 QString trailHtml(const Trail& trail) {
     // One table a step: the sheet moves a step that does not fit to the next page as a whole.
     QString html;
-    for (const TrailStep& step : trail.steps) {
-        QString middle;
-        if (!step.formula.empty()) middle += "= " + mathHtml(step.formula);
-        if (!step.with_numbers.empty() && step.with_numbers != step.formula)
-            middle += (middle.isEmpty() ? "" : "<br/>") + QStringLiteral("= ") + mathHtml(step.with_numbers);
-        if (step.result != step.with_numbers)
-            middle +=
-                (middle.isEmpty() ? "" : "<br/>") + QStringLiteral("<b>= ") + escaped(step.result) + "</b>";
+    for (const TrailStep& step : trail.steps)
         html += "<table width='100%' cellpadding='2' cellspacing='0'><tr><td width='11%' valign='top'><b>" +
-                mathHtml(step.symbol) + "</b></td><td width='43%' valign='top'>" + middle +
+                mathHtml(step.symbol) + "</b></td><td width='43%' valign='top'>" + calculationHtml(step) +
                 "</td><td width='46%' valign='top'>" + escaped(step.meaning) + "<br/><i>" +
                 escaped(step.source) + "</i></td></tr></table>";
-    }
     return html;
 }

@@ -16,5 +16,5 @@ class TrailView : public QTextBrowser {
 /// Formula text with powers raised and indices lowered: "t^0.75", "H_EL".
 QString mathHtml(const std::string& formula);
 
-/// The steps as HTML that QTextDocument understands, for the window and the sheet.
+/// The steps as tables in HTML that QTextDocument understands, for the sheet.
 QString trailHtml(const dosimetry::Trail& trail);
