@@ -1,7 +1,6 @@
 #include "route_view/route_painter.h"
 
 #include <QPainter>
-#include <QPainterPath>
 #include <QPalette>
 #include <algorithm>
 #include <cmath>

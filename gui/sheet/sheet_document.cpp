@@ -28,11 +28,12 @@ QString styleSheet() {
         "table.grid td, table.grid th { border: 0.5px solid #606060; }");
 }
 
-/// A table of margins together with the table of other values that follows it directly; other tables alone.
+/// A wide table (margins, signatures) together with the table that follows it directly and belongs to it;
+/// facts and the steps of a trail, of two and three columns, alone.
 QRectF groupRect(const QTextDocument& document, QTextFrame* first) {
     QRectF rect = document.documentLayout()->frameBoundingRect(first);
     const auto* table = qobject_cast<QTextTable*>(first);
-    if (!table || table->columns() <= 2) return rect;
+    if (!table || table->columns() <= 3) return rect;
     const QList<QTextFrame*> frames = document.rootFrame()->childFrames();
     for (qsizetype i = frames.indexOf(first) + 1; i < frames.size(); ++i) {
         const bool directly = document.findBlock(frames[i]->firstPosition() - 1).text().isEmpty() &&

@@ -39,9 +39,6 @@ QColor skinZone(const QPalette& palette) {
 QColor faint(const QPalette& palette) {
     return mixed(palette.color(QPalette::Text), palette.color(QPalette::Base), 0.22);
 }
-QColor secondaryText(const QPalette& palette) {
-    return mixed(palette.color(QPalette::Text), palette.color(QPalette::Base), 0.68);
-}
 QColor invalidField(const QPalette& palette) {
     return mixed(danger(), palette.color(QPalette::Base), 0.18);
 }

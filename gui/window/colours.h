@@ -15,7 +15,6 @@ QColor beam(const QPalette& palette);
 QColor eyeZone(const QPalette& palette);
 QColor skinZone(const QPalette& palette);
 QColor faint(const QPalette& palette);  ///< grid lines, secondary marks
-QColor secondaryText(const QPalette& palette);
 QColor invalidField(const QPalette& palette);
 QColor invalidText(const QPalette& palette);
 bool isDark(const QPalette& palette);
